@@ -1,11 +1,13 @@
 using Microsoft.AspNetCore.Identity;
 using Microsoft.AspNetCore.Identity.EntityFrameworkCore;
 using Microsoft.EntityFrameworkCore;
+using Microsoft.EntityFrameworkCore.Storage.ValueConversion;
 using Plant.Register.Access;
 using Plant.Register.Audit;
 using Plant.Register.Reservoirs;
 using Plant.Register.Samples;
 using Plant.Register.Separators;
+using Plant.Register.Storage.Mapping;
 using Plant.Register.WorkOrders;
 
 namespace Plant.Register.Storage;
@@ -42,5 +44,41 @@ public sealed class PlantDbContext(DbContextOptions<PlantDbContext> options)
 
     public DbSet<AuditEntry> AuditEntries => Set<AuditEntry>();
 
+    public DbSet<AuditHead> AuditHeads => Set<AuditHead>();
+
     public DbSet<Revision> Revisions => Set<Revision>();
+
+    /// <summary>Rows written in bulk within this unit of work, for the audit chain.</summary>
+    public List<RecordBatch> Batches { get; } = [];
+
+    private bool IsSqlite => Database.ProviderName!.EndsWith("Sqlite", StringComparison.Ordinal);
+
+    protected override void OnModelCreating(ModelBuilder builder)
+    {
+        base.OnModelCreating(builder);
+        ReservoirMapping.Map(builder);
+        SampleMapping.Map(builder);
+        WorkMapping.Map(builder);
+    }
+
+    protected override void ConfigureConventions(ModelConfigurationBuilder configurationBuilder)
+    {
+        base.ConfigureConventions(configurationBuilder);
+        if (IsSqlite)
+        {
+            configurationBuilder.Properties<DateTime>().HaveConversion<UnixMilliseconds>();
+        }
+        else
+        {
+            configurationBuilder.Properties<DateTime>().HaveConversion<Utc>();
+        }
+    }
+
+    private sealed class UnixMilliseconds() : ValueConverter<DateTime, long>(
+        time => new DateTimeOffset(DateTime.SpecifyKind(time, DateTimeKind.Utc)).ToUnixTimeMilliseconds(),
+        milliseconds => DateTimeOffset.FromUnixTimeMilliseconds(milliseconds).UtcDateTime);
+
+    private sealed class Utc() : ValueConverter<DateTime, DateTime>(
+        time => DateTime.SpecifyKind(time, DateTimeKind.Utc),
+        time => DateTime.SpecifyKind(time, DateTimeKind.Utc));
 }
