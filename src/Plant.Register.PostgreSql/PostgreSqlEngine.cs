@@ -82,6 +82,13 @@ public sealed class PostgreSqlEngine : IDatabaseEngine
         return kept;
     }
 
+    public Task<bool> ExistsAsync(PlantDbContext context, CancellationToken cancellation) => context.Database.CanConnectAsync(cancellation);
+
+    public Task BackupBeforeUpgradeAsync(PlantDbContext context, string version, CancellationToken cancellation) => Task.CompletedTask;
+
+    // the server frees the lock of a process that died
+    public Task ClearStaleMigrationLockAsync(PlantDbContext context, CancellationToken cancellation) => Task.CompletedTask;
+
     public bool IsUniqueViolation(Exception failure) => failure.InnerException is PostgresException { SqlState: PostgresErrorCodes.UniqueViolation };
 
     private static NpgsqlConnection Connection(PlantDbContext context) => (NpgsqlConnection)context.Database.GetDbConnection();

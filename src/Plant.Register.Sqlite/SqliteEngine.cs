@@ -1,4 +1,3 @@
-using System.Globalization;
 using Microsoft.Data.Sqlite;
 using Microsoft.EntityFrameworkCore;
 using Microsoft.EntityFrameworkCore.Storage;
@@ -101,7 +100,7 @@ public sealed class SqliteEngine : IDatabaseEngine, IDisposable
     public async Task<string> RestoreAsync(PlantDbContext context, string file, CancellationToken cancellation)
     {
         await RequireSoundAsync(file, cancellation);
-        var database = new SqliteConnectionStringBuilder(context.Database.GetConnectionString()).DataSource;
+        var database = FileOf(context);
         var kept = FormattableString.Invariant($"{database}.replaced-{new FileInfo(file).LastWriteTimeUtc:yyyyMMddHHmmssfff}");
         if (File.Exists(database))
         {
@@ -124,10 +123,31 @@ public sealed class SqliteEngine : IDatabaseEngine, IDisposable
         return kept;
     }
 
+    public Task<bool> ExistsAsync(PlantDbContext context, CancellationToken cancellation) =>
+        Task.FromResult(File.Exists(FileOf(context)));
+
+    public Task BackupBeforeUpgradeAsync(PlantDbContext context, string version, CancellationToken cancellation) =>
+        BackupAsync(context, $"{FileOf(context)}.before-{version}", cancellation);
+
+    public async Task ClearStaleMigrationLockAsync(PlantDbContext context, CancellationToken cancellation)
+    {
+        if (!File.Exists(FileOf(context)))
+        {
+            return;
+        }
+
+        // an embedded database has one program: a lock row that is there before this one starts its upgrade is left from a killed one
+        await context.Database.OpenConnectionAsync(cancellation);
+        await using var command = Command(context, "DROP TABLE IF EXISTS \"__EFMigrationsLock\"");
+        await command.ExecuteNonQueryAsync(cancellation);
+    }
+
     public bool IsUniqueViolation(Exception failure) =>
         failure.InnerException is SqliteException { SqliteErrorCode: ConstraintFailed, SqliteExtendedErrorCode: 2067 or 1555 };
 
     public void Dispose() => gate.Dispose();
+
+    private static string FileOf(PlantDbContext context) => new SqliteConnectionStringBuilder(context.Database.GetConnectionString()).DataSource;
 
     private static SqliteCommand Command(PlantDbContext context, string sql)
     {

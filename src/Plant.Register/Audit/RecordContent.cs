@@ -17,6 +17,9 @@ public static class RecordContent
     /// <summary>Kind of the sensor readings, which are no records of their own.</summary>
     public const string ReadingKind = "reading";
 
+    /// <summary>Kind of what records said before.</summary>
+    public const string RevisionKind = "revision";
+
     private static readonly Dictionary<Type, string> Kinds = new()
     {
         [typeof(Fluid)] = "fluid",
@@ -46,6 +49,9 @@ public static class RecordContent
     public static byte[] Bytes(IRecord record) => JsonSerializer.SerializeToUtf8Bytes(record, record.GetType(), Options);
 
     public static byte[] Bytes(string content) => Encoding.UTF8.GetBytes(content);
+
+    public static byte[] Bytes(Revision revision) => JsonSerializer.SerializeToUtf8Bytes(
+        new object[] { revision.Id, revision.Kind, revision.RecordId, revision.Number, revision.Content, new DateTimeOffset(revision.ReplacedAt).ToUnixTimeMilliseconds(), revision.ReplacedBy, revision.Reason });
 
     /// <summary>Content of a sensor reading in 28 bytes.</summary>
     public static void Write(Reading reading, Span<byte> content)

@@ -107,7 +107,7 @@ public sealed record ReservoirFields : IFields
             refusals.Add(new Refusal("suctionHeightMm", Number(SuctionHeightMm.Value), $"must not be above heightMm ({Number(HeightMm.Value)})"));
         }
 
-        if (FullVolumeL is { } full && OilVolumeL > full * 1.01)
+        if (FullVolumeL is { } full && OilVolumeL > full * 1.05)
         {
             refusals.Add(new Refusal("oilVolumeL", Number(OilVolumeL.Value), string.Create(CultureInfo.InvariantCulture, $"is more than the tank of these dimensions holds ({full:0} L): check the shape and its dimensions")));
         }

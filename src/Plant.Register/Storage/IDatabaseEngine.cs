@@ -27,6 +27,15 @@ public interface IDatabaseEngine
     /// <summary>Checks a copy, then puts it in the place of the database and keeps what it replaced.</summary>
     Task<string> RestoreAsync(PlantDbContext context, string file, CancellationToken cancellation);
 
+    /// <summary>True where there is a database yet.</summary>
+    Task<bool> ExistsAsync(PlantDbContext context, CancellationToken cancellation);
+
+    /// <summary>Keeps a copy beside an embedded database before its schema changes; a server's operator makes their own.</summary>
+    Task BackupBeforeUpgradeAsync(PlantDbContext context, string version, CancellationToken cancellation);
+
+    /// <summary>Removes the lock that a process killed during an upgrade left behind.</summary>
+    Task ClearStaleMigrationLockAsync(PlantDbContext context, CancellationToken cancellation);
+
     /// <summary>True where a failed write hit a unique key.</summary>
     bool IsUniqueViolation(Exception failure);
 }

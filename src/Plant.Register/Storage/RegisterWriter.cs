@@ -63,6 +63,9 @@ public sealed class RegisterWriter(IDbContextFactory<PlantDbContext> contexts, I
         }
     }
 
+    /// <summary>Both databases keep times to the millisecond, so what is hashed must not be finer.</summary>
+    private static DateTime Milliseconds(DateTimeOffset time) => DateTimeOffset.FromUnixTimeMilliseconds(time.ToUnixTimeMilliseconds()).UtcDateTime;
+
     private static async Task<string> StaleMessageAsync(PlantDbContext context, DbUpdateConcurrencyException stale, CancellationToken cancellation)
     {
         var record = (IRecord)stale.Entries[0].Entity;
@@ -93,7 +96,7 @@ public sealed class RegisterWriter(IDbContextFactory<PlantDbContext> contexts, I
             return null;
         }
 
-        var now = clock.GetUtcNow().UtcDateTime;
+        var now = Milliseconds(clock.GetUtcNow());
         var chain = await AuditChain.OpenAsync(context, now, actor, reason?.Trim(), cancellation);
         foreach (var entry in created)
         {
@@ -139,7 +142,7 @@ public sealed class RegisterWriter(IDbContextFactory<PlantDbContext> contexts, I
         var before = RecordContent.Of(earlier);
         delta.Remove(RecordContent.Bytes(before));
         var number = await context.Revisions.CountAsync(r => r.RecordId == record.Id, cancellation) + 1;
-        context.Revisions.Add(new Revision
+        var revision = new Revision
         {
             Id = Guid.CreateVersion7(),
             Kind = kind,
@@ -149,8 +152,12 @@ public sealed class RegisterWriter(IDbContextFactory<PlantDbContext> contexts, I
             ReplacedAt = now,
             ReplacedBy = actor.Name,
             Reason = reason!.Trim(),
-        });
+        };
+        context.Revisions.Add(revision);
         var action = record.WithdrawnAt is not null && earlier.WithdrawnAt is null ? "withdrawn" : "amended";
         chain.Append(action, kind, record.Id, record.NaturalKey, content, 0, delta);
+        var kept = default(ContentSum);
+        kept.Add(RecordContent.Bytes(revision));
+        chain.Append("kept", RecordContent.RevisionKind, revision.Id, record.NaturalKey, "{}", 1, kept);
     }
 }
