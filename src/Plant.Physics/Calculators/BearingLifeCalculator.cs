@@ -29,7 +29,7 @@ public static class BearingLifeCalculator
 
         var working = new Working();
         var life = BearingLife.Relative(water);
-        working.Add("relative life", FormattableString.Invariant($"(100/{water})^0.6"), life, "1", References.Cantley,
+        working.Add("relative life", FormattableString.Invariant($"(100/{water})^0.6"), life, "1", Citations.Cantley,
             water is < BearingLife.TestedFromPpm or > BearingLife.TestedToPpm ? "outside the tested 25 to 400 mg/kg: extrapolated" : null);
         return new(new BearingLifeResponse(life, working.Steps), []);
     }

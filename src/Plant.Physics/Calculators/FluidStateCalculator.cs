@@ -41,17 +41,17 @@ public static class FluidStateCalculator
         var working = new Working();
         var dynamic = fluid.DynamicViscosityPaS(temperature, working);
         var water = WaterProperties.DensityKgM3(temperature);
-        working.Add("density of water", FormattableString.Invariant($"Kell's polynomial at {request.TemperatureC} °C"), water, "kg/m³", References.Kell,
+        working.Add("density of water", FormattableString.Invariant($"Kell's polynomial at {request.TemperatureC} °C"), water, "kg/m³", Citations.Kell,
             request.TemperatureC is < 0 or > 100 ? "outside 0 to 100 °C: extrapolated" : null);
         var goes = fluid.WaterGoes(temperature, working);
         double? saturation = fluid.HasSaturation ? fluid.SaturationPpm(temperature, working) : null;
         if (saturation is null)
         {
-            working.Add("saturation", "a water-soluble polyalkylene glycol has none", null, "mg/kg", References.FamilyDefault);
+            working.Add("saturation", "a water-soluble polyalkylene glycol has none", null, "mg/kg", Citations.FamilyDefault);
         }
 
         var inversion = fluid.InversionTemperatureK() - Constants.ZeroCelsiusK;
-        working.Add("inversion temperature", "density of water = density of the fluid, searched from 0 to 120 °C", inversion, "°C", References.Kell,
+        working.Add("inversion temperature", "density of water = density of the fluid, searched from 0 to 120 °C", inversion, "°C", Citations.Kell,
             inversion is null ? "none from 0 to 120 °C" : "an error of 2 kg/m³ in the density moves it by about 4 to 6 °C");
         return new(
             new FluidStateResponse(fluid.KinematicViscosityM2S(temperature) * 1e6, dynamic * 1000, fluid.DensityKgM3(temperature), water,

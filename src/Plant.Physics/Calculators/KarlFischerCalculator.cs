@@ -99,7 +99,7 @@ public static class KarlFischerCalculator
 
         working.Add(string.Create(CultureInfo.InvariantCulture, $"replicate {index + 1}"),
             string.Create(CultureInfo.InvariantCulture, $"({water:0.###} µg − {drift}·{minutes} − {blank})/{mass} g"), content, "mg/kg",
-            titration.ChargeC is null ? "common practice" : References.Faraday);
+            titration.ChargeC is null ? "common practice" : Citations.Faraday);
         return content;
     }
 }

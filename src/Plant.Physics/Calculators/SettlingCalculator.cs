@@ -47,9 +47,9 @@ public static class SettlingCalculator
         var working = new Working();
         var settling = new DropletSettling(fluid, temperature, working);
         var mobile = request.MobileInterface ?? false;
-        working.Add("density of water less density of the fluid", "ρw − ρo", settling.DensityDifferenceKgM3, "kg/m³", References.Kell,
+        working.Add("density of water less density of the fluid", "ρw − ρo", settling.DensityDifferenceKgM3, "kg/m³", Citations.Kell,
             Math.Abs(settling.DensityDifferenceKgM3) < Constants.NeutralDensityKgM3 ? "within 5 kg/m³: do not count on gravity" : null);
-        working.Add("hindering", FormattableString.Invariant($"(1 − {fraction})^4.65"), Settling.RichardsonZakiFactor(fraction), "1", References.RichardsonZaki);
+        working.Add("hindering", FormattableString.Invariant($"(1 − {fraction})^4.65"), Settling.RichardsonZakiFactor(fraction), "1", Citations.RichardsonZaki);
         var rows = new List<SettlingRow>(sizes.Count);
         var fastest = 0.0;
         foreach (var size in sizes)
@@ -61,7 +61,7 @@ public static class SettlingCalculator
         }
 
         working.Add("velocity of one drop", mobile ? "g·d²·Δρ/(18μ)·3(1 + k)/(2 + 3k)" : "v·(1 + 0.15·Re^0.687) = g·d²·Δρ/(18μ)", rows[0].VelocityMmPerS, "mm/s",
-            mobile ? References.HadamardRybczynski : References.SchillerNaumann, fastest > 1000 ? "a Reynolds number is above 1000: outside the range of the drag law" : null);
+            mobile ? Citations.HadamardRybczynski : Citations.SchillerNaumann, fastest > 1000 ? "a Reynolds number is above 1000: outside the range of the drag law" : null);
         return new(new SettlingResponse(rows, working.Steps), []);
     }
 }

@@ -94,12 +94,12 @@ public static class TankCalculator
         var cut = settling.CutSizeM(rate) * 1e6;
         var removal = GravitySeparation.LognormalRemoval(fluid, temperature, rate, series, median, deviation);
         var residence = GravitySeparation.ResidenceTimeS(volume, flow) / 60;
-        working.Add("oil depth", "inverse of the volume", depth * 1000, "mm", References.Geometry);
-        working.Add("plan area at the level", $"{request.Shape}", area, "m²", References.Geometry);
-        working.Add("residence time", "V/Q", residence, "min", References.Geometry);
-        working.Add("overflow rate", "Q/A", rate * 1000, "mm/s", References.Overflow);
-        working.Add("cut size", "v(d) = Q/A with Schiller–Naumann drag", cut, "µm", References.SchillerNaumann, cut is null ? "no drop up to 100 mm is that fast" : null);
-        working.Add("removed share", series is { } n ? FormattableString.Invariant($"∫ 1 − (1 + vA/({n}Q))^−{n} dF, lognormal by volume") : "∫ min(1, vA/Q) dF, lognormal by volume", removal, "1", References.Overflow);
+        working.Add("oil depth", "inverse of the volume", depth * 1000, "mm", Citations.Geometry);
+        working.Add("plan area at the level", $"{request.Shape}", area, "m²", Citations.Geometry);
+        working.Add("residence time", "V/Q", residence, "min", Citations.Geometry);
+        working.Add("overflow rate", "Q/A", rate * 1000, "mm/s", Citations.Overflow);
+        working.Add("cut size", "v(d) = Q/A with Schiller–Naumann drag", cut, "µm", Citations.SchillerNaumann, cut is null ? "no drop up to 100 mm is that fast" : null);
+        working.Add("removed share", series is { } n ? FormattableString.Invariant($"∫ 1 − (1 + vA/({n}Q))^−{n} dF, lognormal by volume") : "∫ min(1, vA/Q) dF, lognormal by volume", removal, "1", Citations.Overflow);
         return new(new TankResponse(depth * 1000, area, residence, cut, removal, working.Steps), []);
     }
 

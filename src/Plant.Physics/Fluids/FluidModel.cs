@@ -95,7 +95,7 @@ public sealed class FluidModel
     {
         var value = viscosity.AtMm2S(temperatureK);
         working?.Add("kinematic viscosity", FormattableString.Invariant($"log10 log10 Z = {viscosity.A:0.######} − {viscosity.B:0.######}·log10 {temperatureK:0.##} K"), value, "mm²/s",
-            References.D341, ViscosityIsFamilyDefault ? "a viscosity of the fluid is assumed from its grade or family (from memory, unverified)" : null);
+            Citations.D341, ViscosityIsFamilyDefault ? "a viscosity of the fluid is assumed from its grade or family (from memory, unverified)" : null);
         return value * 1e-6;
     }
 
@@ -124,7 +124,7 @@ public sealed class FluidModel
             linearExpansion
                 ? FormattableString.Invariant($"{density15KgM3}·(1 − {expansionPerK}·({delta:0.##} K))")
                 : FormattableString.Invariant($"{density15KgM3}·exp(−αΔ(1 + 0.8αΔ)), α = {expansionPerK:0.######e0} 1/K, Δ = {delta:0.##} K"),
-            value, "kg/m³", linearExpansion ? References.Expansion : References.D1250, DensityIsFamilyDefault ? "density is the family's default (from memory, unverified)" : null);
+            value, "kg/m³", linearExpansion ? Citations.Expansion : Citations.D1250, DensityIsFamilyDefault ? "density is the family's default (from memory, unverified)" : null);
         return value;
     }
 
@@ -143,7 +143,7 @@ public sealed class FluidModel
 
         var value = Math.Pow(10, solubilityA - (solubilityB / Guard.Positive(temperatureK)));
         working?.Add("saturation", FormattableString.Invariant($"10^({solubilityA} − {solubilityB}/{temperatureK:0.##} K)"), value, "mg/kg",
-            SolubilityIsFamilyDefault ? References.FamilyDefault : References.Solubility, SolubilityIsFamilyDefault ? "solubility is the family's default: a factor of 1.5 either way" : null);
+            SolubilityIsFamilyDefault ? Citations.FamilyDefault : Citations.Solubility, SolubilityIsFamilyDefault ? "solubility is the family's default: a factor of 1.5 either way" : null);
         return value;
     }
 
@@ -177,7 +177,7 @@ public sealed class FluidModel
     {
         var difference = DensityDifferenceKgM3(temperatureK);
         working?.Add("density of water less density of the fluid", FormattableString.Invariant($"{WaterProperties.DensityKgM3(temperatureK):0.##} − {DensityKgM3(temperatureK):0.##}"),
-            difference, "kg/m³", References.Kell, Math.Abs(difference) < Constants.NeutralDensityKgM3 ? "within 5 kg/m³: gravity does not separate them" : null);
+            difference, "kg/m³", Citations.Kell, Math.Abs(difference) < Constants.NeutralDensityKgM3 ? "within 5 kg/m³: gravity does not separate them" : null);
         return Math.Abs(difference) < Constants.NeutralDensityKgM3 ? WaterDirection.Neither : difference > 0 ? WaterDirection.Down : WaterDirection.Up;
     }
 

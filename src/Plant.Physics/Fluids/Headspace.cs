@@ -33,7 +33,7 @@ public static class Headspace
         ArgumentNullException.ThrowIfNull(fluid);
         var activity = EquilibriumActivity(oilTemperatureK, waterPressurePa);
         var value = fluid.SaturationPpm(oilTemperatureK) * activity;
-        working?.Add("content in equilibrium with the headspace", FormattableString.Invariant($"S·p/psat = {fluid.SaturationPpm(oilTemperatureK):0.#}·{activity:0.####}"), value, "mg/kg", References.Headspace);
+        working?.Add("content in equilibrium with the headspace", FormattableString.Invariant($"S·p/psat = {fluid.SaturationPpm(oilTemperatureK):0.#}·{activity:0.####}"), value, "mg/kg", Citations.Headspace);
         return value;
     }
 

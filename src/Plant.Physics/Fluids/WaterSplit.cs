@@ -38,7 +38,7 @@ public static class WaterSplit
             working.Add("undissolved", FormattableString.Invariant($"max(0, {waterPpm:0.###} − {saturation:0.###})"), waterPpm - dissolved, "mg/kg", "definition");
             working.Add("water activity", FormattableString.Invariant($"min(1, {waterPpm:0.###}/{saturation:0.###})"), activity, "1", "definition",
                 activity > 0.9 ? "above 0.9 the straight line is an approximation" : null);
-            working.Add("chance of free water", FormattableString.Invariant($"Φ(({waterPpm:0.###} − {saturation:0.###})/{standardUncertaintyPpm:0.###})"), chance, "1", References.Normal);
+            working.Add("chance of free water", FormattableString.Invariant($"Φ(({waterPpm:0.###} − {saturation:0.###})/{standardUncertaintyPpm:0.###})"), chance, "1", Citations.Normal);
         }
 
         return new WaterSplitResult(dissolved, waterPpm - dissolved, saturation, activity, chance);

@@ -10,10 +10,10 @@ public sealed record Repeatability(string Method, double Coefficient, double Pow
     /// <summary>The table: editable, and unverified until somebody holds it against the standards.</summary>
     public static IReadOnlyList<Repeatability> Table { get; } =
     [
-        new("kf-coulometric", 1.874, 0.5, References.Iso12937),
+        new("kf-coulometric", 1.874, 0.5, Citations.Iso12937),
         // r = 0.03813·X^0.6 in %: for mg/kg multiply by 10^4·10^(−4·0.6)
-        new("kf-evaporator", 0.03813 * 39.810717055349734, 0.6, References.D6304),
-        new("kf-volumetric", 2 * 1.874, 0.5, "twice " + References.Iso12937),
+        new("kf-evaporator", 0.03813 * 39.810717055349734, 0.6, Citations.D6304),
+        new("kf-volumetric", 2 * 1.874, 0.5, "twice " + Citations.Iso12937),
     ];
 
     /// <summary>The row of a method.</summary>

@@ -51,6 +51,9 @@ public sealed class PlantDbContext(DbContextOptions<PlantDbContext> options)
     /// <summary>Rows written in bulk within this unit of work, for the audit chain.</summary>
     public List<RecordBatch> Batches { get; } = [];
 
+    /// <summary>Ids of new records that a batch vouches for: they get no audit entry of their own.</summary>
+    public HashSet<Guid> Batched { get; } = [];
+
     private bool IsSqlite => Database.ProviderName!.EndsWith("Sqlite", StringComparison.Ordinal);
 
     protected override void OnModelCreating(ModelBuilder builder)

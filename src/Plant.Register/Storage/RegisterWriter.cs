@@ -79,7 +79,7 @@ public sealed class RegisterWriter(IDbContextFactory<PlantDbContext> contexts, I
     private async Task<Refusal?> RecordAsync(PlantDbContext context, Actor actor, string? reason, CancellationToken cancellation)
     {
         context.ChangeTracker.DetectChanges();
-        var entries = context.ChangeTracker.Entries<IRecord>().Where(e => e.State is EntityState.Added or EntityState.Modified).ToList();
+        var entries = context.ChangeTracker.Entries<IRecord>().Where(e => e.State is EntityState.Modified || (e.State is EntityState.Added && !context.Batched.Contains(e.Entity.Id))).ToList();
         var created = context.ChangeTracker.Entries().Where(e => e.State == EntityState.Added && e.Entity is Area or Site or ApiToken).ToList();
         if (context.ChangeTracker.Entries().Any(e => e.State == EntityState.Deleted && e.Entity is IRecord))
         {
@@ -115,6 +115,8 @@ public sealed class RegisterWriter(IDbContextFactory<PlantDbContext> contexts, I
             await AppendAsync(context, chain, entry, now, actor, reason, cancellation);
         }
 
+        // the importer works without automatic detection; the new tokens must be seen all the same
+        context.ChangeTracker.DetectChanges();
         foreach (var batch in context.Batches)
         {
             chain.Append("imported", batch.Kind, null, batch.Key, batch.Detail, batch.CountDelta, batch.SumDelta);

@@ -1,0 +1,58 @@
+using Plant.Advice.Dehydration;
+using Plant.Advice.Ledger;
+
+namespace Plant.Advice;
+
+/// <summary>One day of a forecast.</summary>
+/// <param name="Day">Days from now.</param>
+/// <param name="WaterPpm">Median water in the oil [mg/kg].</param>
+/// <param name="WaterLow90Ppm">Lower end of its 90 % interval [mg/kg].</param>
+/// <param name="WaterHigh90Ppm">Upper end of its 90 % interval [mg/kg].</param>
+/// <param name="WaterLow50Ppm">Lower end of its 50 % interval [mg/kg].</param>
+/// <param name="WaterHigh50Ppm">Upper end of its 50 % interval [mg/kg].</param>
+/// <param name="SettledL">Median settled water if nobody drains [L]; null where unknown.</param>
+/// <param name="SettledLow90L">Lower end of its 90 % interval [L].</param>
+/// <param name="SettledHigh90L">Upper end of its 90 % interval [L].</param>
+public readonly record struct ForecastDay(
+    int Day, double? WaterPpm, double? WaterLow90Ppm, double? WaterHigh90Ppm, double? WaterLow50Ppm, double? WaterHigh50Ppm,
+    double? SettledL, double? SettledLow90L, double? SettledHigh90L);
+
+/// <summary>The same balance run forward.</summary>
+public static class Forecaster
+{
+    private const double Z50 = 0.6744897501960817;
+
+    /// <summary>Forecast by the day, if nobody does anything.</summary>
+    /// <param name="history">The records.</param>
+    /// <param name="asOf">The time (UTC).</param>
+    /// <param name="rule">The planning rule.</param>
+    /// <param name="days">Number of days.</param>
+    /// <returns>A row a day, today first.</returns>
+    public static IReadOnlyList<ForecastDay> Forecast(ReservoirHistory history, DateTime asOf, PlanningRule rule, int days)
+    {
+        var evidence = Evidence.Gather(history, asOf, rule, null);
+        var rows = new List<ForecastDay>(days + 1);
+        for (var day = 0; day <= days; day++)
+        {
+            double? mean = null, low90 = null, high90 = null, low50 = null, high50 = null;
+            if (evidence.Water is { } water)
+            {
+                var (level, sd) = LimitForecast.At(water, day, evidence.CeilingPpm);
+                var spread = Math.Sqrt(Math.Log(1 + ((sd / level) * (sd / level))));
+                (mean, low90, high90) = (level, level * Math.Exp(-Normal.Z90 * spread), level * Math.Exp(Normal.Z90 * spread));
+                (low50, high50) = (level * Math.Exp(-Z50 * spread), level * Math.Exp(Z50 * spread));
+            }
+
+            rows.Add(new ForecastDay(day, mean, low90, high90, low50, high50,
+                evidence.Settled?.At(day, 0.5), evidence.Settled?.At(day, 0.05), evidence.Settled?.At(day, 0.95)));
+        }
+
+        return rows;
+    }
+
+    /// <summary>The samples as they are judged, for the trend.</summary>
+    /// <param name="history">The records.</param>
+    /// <param name="asOf">The time (UTC).</param>
+    /// <returns>Observations in order, contradicted ones marked.</returns>
+    public static IReadOnlyList<Observation> Observed(ReservoirHistory history, DateTime asOf) => Observations.Of(history, OilState.Of(history).Fluid, asOf);
+}

@@ -1,0 +1,145 @@
+namespace Plant.Advice.Ledger;
+
+/// <summary>How fast water comes in.</summary>
+/// <param name="MedianGPerDay">Median [g/day].</param>
+/// <param name="Low90GPerDay">Lower end of the 90 % interval [g/day].</param>
+/// <param name="High90GPerDay">Upper end of the 90 % interval [g/day].</param>
+/// <param name="ChangedAt">When it changed (UTC), or null.</param>
+/// <param name="EarlierGPerDay">What it was before the change [g/day], or null.</param>
+/// <param name="Intervals">Number of intervals that speak of the present rate [1].</param>
+public sealed record Ingress(double MedianGPerDay, double Low90GPerDay, double High90GPerDay, DateTime? ChangedAt, double? EarlierGPerDay, int Intervals)
+{
+    private const int Cells = 120;
+    private const double LowestPpmPerDay = 0.01;
+    private const double HighestPpmPerDay = 20_000;
+
+    // an interval's own rate scatters about the mean rate: weather, load, washing down
+    private const double Scatter = 0.35;
+
+    // a change is believed at odds that keep false alarms to about one in a reservoir's twenty years
+    private const double ChangeLogLikelihood = 7;
+    private const double ChangeRatio = 2.5;
+
+    /// <summary>Posterior of the rate over a grid of its logarithm: prior times the likelihood of each interval since the last change.</summary>
+    /// <param name="intervals">Balances in order.</param>
+    /// <param name="massKg">Mass of the oil [kg].</param>
+    /// <returns>The estimate.</returns>
+    public static Ingress Estimate(IReadOnlyList<BalanceInterval> intervals, double massKg)
+    {
+        ArgumentNullException.ThrowIfNull(intervals);
+        var (start, changedAt, earlier) = LastChange(intervals);
+        Span<double> weight = stackalloc double[Cells];
+        var step = Math.Log(HighestPpmPerDay / LowestPpmPerDay) / (Cells - 1);
+        var scale = massKg / 1000;
+        var highest = double.NegativeInfinity;
+        for (var cell = 0; cell < Cells; cell++)
+        {
+            var ppmPerDay = LowestPpmPerDay * Math.Exp(step * cell);
+            var z = Math.Log(ppmPerDay / Priors.IngressPpmPerDay) / Priors.IngressLogSd;
+            var log = -0.5 * z * z;
+            for (var i = start; i < intervals.Count; i++)
+            {
+                log += LogLikelihood(intervals[i], ppmPerDay * scale, Age(intervals, i));
+            }
+
+            weight[cell] = log;
+            highest = Math.Max(highest, log);
+        }
+
+        var total = 0.0;
+        for (var cell = 0; cell < Cells; cell++)
+        {
+            weight[cell] = Math.Exp(weight[cell] - highest);
+            total += weight[cell];
+        }
+
+        double At(ReadOnlySpan<double> w, double p)
+        {
+            var sum = 0.0;
+            for (var cell = 0; cell < Cells; cell++)
+            {
+                var next = sum + (w[cell] / total);
+                if (next >= p)
+                {
+                    var inside = w[cell] > 0 ? (p - sum) / (w[cell] / total) : 0.5;
+                    return scale * LowestPpmPerDay * Math.Exp(step * (cell - 0.5 + inside));
+                }
+
+                sum = next;
+            }
+
+            return scale * HighestPpmPerDay;
+        }
+
+        return new Ingress(At(weight, 0.5), At(weight, 0.05), At(weight, 0.95), changedAt, earlier, intervals.Count - start);
+    }
+
+    /// <summary>Old intervals say less of today: half a year halves their weight.</summary>
+    private static double Age(IReadOnlyList<BalanceInterval> intervals, int i) =>
+        Math.Pow(0.5, (intervals[^1].To - intervals[i].To).TotalDays / 180);
+
+    private static double LogLikelihood(BalanceInterval interval, double rateGPerDay, double weight)
+    {
+        var sd = Math.Sqrt((interval.SdGPerDay * interval.SdGPerDay) + Math.Pow(Scatter * rateGPerDay, 2));
+        var z = (interval.IngressGPerDay - rateGPerDay) / sd;
+        if (interval.LowerBoundOnly)
+        {
+            // water may have settled unseen: only a rate below what the oil took up is unlikely
+            return z > 0 ? -0.5 * weight * Math.Min(z * z, 25) : 0;
+        }
+
+        // Student's t with 4 degrees of freedom: one odd interval does not decide
+        return weight * ((-2.5 * Math.Log(1 + (z * z / 4))) - Math.Log(sd));
+    }
+
+    private static (int Start, DateTime? At, double? Earlier) LastChange(IReadOnlyList<BalanceInterval> intervals)
+    {
+        var best = 0.0;
+        var at = 0;
+        double before = 0, after = 0;
+        for (var cut = 3; cut <= intervals.Count - 2; cut++)
+        {
+            var first = LogMean(intervals, 0, cut);
+            var second = LogMean(intervals, cut, intervals.Count);
+            var whole = LogMean(intervals, 0, intervals.Count);
+            var gain = 0.5 * (whole.Loss - first.Loss - second.Loss);
+            if (gain > best && Math.Exp(Math.Abs(second.Mean - first.Mean)) > ChangeRatio)
+            {
+                best = gain;
+                at = cut;
+                (before, after) = (first.Mean, second.Mean);
+            }
+        }
+
+        return best > ChangeLogLikelihood && after > before ? (at, intervals[at].From.AddDays(0.5 * Math.Min(30, intervals[at].Days)), Math.Exp(before)) : (0, null, null);
+    }
+
+    /// <summary>Mean of the logarithms and the loss about it.</summary>
+    private static (double Mean, double Loss) LogMean(IReadOnlyList<BalanceInterval> intervals, int from, int to)
+    {
+        double weights = 0, sum = 0;
+        for (var i = from; i < to; i++)
+        {
+            var (value, sd) = LogRate(intervals[i]);
+            weights += 1 / (sd * sd);
+            sum += value / (sd * sd);
+        }
+
+        var mean = sum / weights;
+        var loss = 0.0;
+        for (var i = from; i < to; i++)
+        {
+            var (value, sd) = LogRate(intervals[i]);
+            loss += Math.Min(Math.Pow((value - mean) / sd, 2), 16);
+        }
+
+        return (mean, loss);
+    }
+
+    private static (double Value, double Sd) LogRate(BalanceInterval interval)
+    {
+        var floor = Math.Max(1, interval.SdGPerDay);
+        var rate = Math.Max(interval.IngressGPerDay, 0) + floor;
+        return (Math.Log(rate), Math.Sqrt((Scatter * Scatter) + Math.Pow(interval.SdGPerDay / rate, 2)));
+    }
+}
