@@ -80,7 +80,7 @@ public sealed class RegisterWriter(IDbContextFactory<PlantDbContext> contexts, I
     {
         context.ChangeTracker.DetectChanges();
         var entries = context.ChangeTracker.Entries<IRecord>().Where(e => e.State is EntityState.Modified || (e.State is EntityState.Added && !context.Batched.Contains(e.Entity.Id))).ToList();
-        var created = context.ChangeTracker.Entries().Where(e => e.State == EntityState.Added && e.Entity is Area or Site or ApiToken).ToList();
+        var created = context.ChangeTracker.Entries().Where(e => e.State == EntityState.Added && e.Entity is Area or Site or ApiToken or PlantUser).ToList();
         if (context.ChangeTracker.Entries().Any(e => e.State == EntityState.Deleted && e.Entity is IRecord))
         {
             throw new InvalidOperationException("a record is withdrawn, never deleted");
@@ -105,6 +105,7 @@ public sealed class RegisterWriter(IDbContextFactory<PlantDbContext> contexts, I
                 Area area => ("area", area.Name),
                 Site site => ("site", site.Name),
                 ApiToken token => ("token", token.Name),
+                PlantUser person => ("person", person.Email ?? person.UserName ?? string.Empty),
                 _ => throw new InvalidOperationException(),
             };
             chain.Append("created", kind, null, key, "{}", 0, default);
