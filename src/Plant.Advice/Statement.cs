@@ -119,7 +119,7 @@ internal static class Statement
         {
             text.Add(condition switch
             {
-                Condition.FreeWater when evidence.Settled is { MedianL: > 0.05 } settled =>
+                Condition.FreeWater when evidence.Settled is { MedianL: > 0 } settled && (settled.MedianL > 0.05 || water.WaterPpm <= saturation) =>
                     $"About {Litres(settled.MedianL)} of water {(evidence.Oil.WaterGoes == WaterDirection.Up ? "float on" : "stand under")} the oil ({Litres(settled.Low90L)} to {Litres(settled.High90L)}); {Ppm(water.WaterPpm)} in it against {Ppm(saturation)} that it holds.",
                 Condition.FreeWater => $"{Ppm(water.WaterPpm)} in the oil, more than the {Ppm(saturation)} that it holds while running.",
                 Condition.FreeWaterWhenCold => $"{Ppm(water.WaterPpm)} stay dissolved while it runs ({Ppm(saturation)}), but cold it holds only {Ppm(evidence.Oil.SaturationColdestPpm!.Value)}.",

@@ -1,2 +1,40 @@
-var app = WebApplication.CreateBuilder(args).Build();
+using Plant.Web.Api;
+using Plant.Web.Commands;
+using Plant.Web.Features.Account;
+using Plant.Web.Features.Fleet;
+using Plant.Web.Features.Register;
+using Plant.Web.Features.Reservoir;
+using Plant.Web.Hosting;
+using Plant.Web.Shared;
+
+if (await CommandRunner.TryRunAsync(args) is { } code)
+{
+    return code;
+}
+
+var builder = WebApplication.CreateBuilder(new WebApplicationOptions { Args = args[0..] is ["serve", .. var rest] ? rest : args });
+var settings = PlantSettings.Read(builder.Configuration);
+settings.PrepareFolder();
+builder.AddHosting(settings);
+builder.Services.AddPlant(settings);
+builder.Services.AddAccount();
+builder.Services.AddApi();
+builder.Services.AddLook();
+builder.Services.AddFleet();
+builder.Services.AddReservoirPages();
+builder.Services.AddRegisterPages();
+
+var app = builder.Build();
+app.UseHosting();
+app.MapHealth();
+app.MapApi();
+app.MapAccount();
+app.MapFleet();
+app.MapRegister();
+app.MapRazorComponents<App>().AddInteractiveServerRenderMode();
+await app.PrepareAsync();
 await app.RunAsync();
+return CommandRunner.Done;
+
+/// <summary>The program; tests start it.</summary>
+public sealed partial class Program;

@@ -3,6 +3,7 @@ using Microsoft.AspNetCore.Http.HttpResults;
 using Microsoft.AspNetCore.Identity;
 using Microsoft.AspNetCore.Mvc;
 using Plant.Register.Access;
+using SignInResult = Microsoft.AspNetCore.Identity.SignInResult;
 
 namespace Plant.Web.Features.Account;
 
