@@ -156,6 +156,11 @@ internal static class Statement
             }
         }
 
+        if (evidence.CapacityL is null && evidence.Settled is { MedianL: > 0.05 })
+        {
+            actions.Add("Enter the tank's dimensions and suction height, or how much water may stand: without them no drain date can be told.");
+        }
+
         if (evidence.Oil.WaterGoes == WaterDirection.Neither && evidence.FreeColdest >= 0.5)
         {
             actions.Add("Water and fluid weigh the same here: do not count on draining.");

@@ -12,7 +12,11 @@ if (await CommandRunner.TryRunAsync(args) is { } code)
     return code;
 }
 
-var builder = WebApplication.CreateBuilder(new WebApplicationOptions { Args = args[0..] is ["serve", .. var rest] ? rest : args });
+var builder = WebApplication.CreateBuilder(new WebApplicationOptions
+{
+    Args = args is ["serve", .. var rest] ? rest : args,
+    ContentRootPath = File.Exists("appsettings.json") ? null : AppContext.BaseDirectory,
+});
 var settings = PlantSettings.Read(builder.Configuration);
 settings.PrepareFolder();
 builder.AddHosting(settings);

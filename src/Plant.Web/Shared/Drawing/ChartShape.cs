@@ -20,6 +20,7 @@ internal static class ChartShape
             PlotBgColor = "rgba(0,0,0,0)",
             ShowLegend = false,
             AutoSize = true,
+            Height = 300,
             Margin = new Margin { L = 56, R = 130, T = 10, B = 40 },
             Font = new Font { Family = "Source Sans 3, sans-serif", Size = 12, Color = colours[Ink2] },
             XAxis = [new XAxis { GridColor = colours[Line], ZeroLineColor = colours[Line2], Title = new Plotly.Blazor.LayoutLib.XAxisLib.Title { Text = series.Any(s => s.X.Count > 0 && s.X[0] is DateTime) ? null : xTitle } }],
