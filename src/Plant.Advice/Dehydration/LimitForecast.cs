@@ -9,6 +9,7 @@ public static class LimitForecast
     public const double Chance = 0.05;
 
     private const int HorizonDays = 365;
+    private const double WidestShare = 0.35;
 
     // a trend is followed for so long and then taken to have met its balance with the headspace [days]
     private const double TrendDays = 120;
@@ -30,7 +31,8 @@ public static class LimitForecast
 
         mean = Math.Max(mean, Math.Max(1, 0.2 * water.WaterPpm));
         var variance = (water.SdPpm * water.SdPpm) + Math.Pow(water.SlopeSdPpmPerDay * reach, 2) + (water.WanderPpm2PerDay * Math.Min(days, 180));
-        return (mean, Math.Sqrt(variance));
+        // circulating oil neither loses all of its water nor holds much more than it can: the spread is bounded
+        return (mean, Math.Min(Math.Sqrt(variance), Math.Max(water.SdPpm, WidestShare * mean)));
     }
 
     /// <summary>Chance that the content is above a limit some days from now.</summary>
