@@ -8,6 +8,7 @@ public sealed class CsvFile<T>(string path, IReadOnlyList<Column<T>> columns, Fi
     where T : class, Storage.IFields, new()
 {
     private const int LongestCell = 10_000;
+    private const string NotUtf8 = "holds bytes that are not UTF-8: save the file as UTF-8";
 
     private readonly List<Physics.Refusal> refusals = [];
 
@@ -20,7 +21,12 @@ public sealed class CsvFile<T>(string path, IReadOnlyList<Column<T>> columns, Fi
             yield break;
         }
 
-        using var reader = Sep.Reader(options => options with { Sep = Sep.New(','), HasHeader = false, Unescape = true, DisableColCountCheck = true, DisableQuotesParsing = false }).From(text);
+        using var reader = Read(text);
+        if (reader is null)
+        {
+            yield break;
+        }
+
         Column<T>[]? header = null;
         while (Next(reader))
         {
@@ -60,6 +66,19 @@ public sealed class CsvFile<T>(string path, IReadOnlyList<Column<T>> columns, Fi
         return new StreamReader(stream, new UTF8Encoding(false, throwOnInvalidBytes: true), detectEncodingFromByteOrderMarks: true, 1 << 16);
     }
 
+    private SepReader? Read(StreamReader text)
+    {
+        try
+        {
+            return Sep.Reader(options => options with { Sep = Sep.New(','), HasHeader = false, Unescape = true, DisableColCountCheck = true }).From(text);
+        }
+        catch (DecoderFallbackException)
+        {
+            report.Refuse(1, string.Empty, string.Empty, NotUtf8);
+            return null;
+        }
+    }
+
     private bool Next(SepReader reader)
     {
         try
@@ -68,7 +87,7 @@ public sealed class CsvFile<T>(string path, IReadOnlyList<Column<T>> columns, Fi
         }
         catch (DecoderFallbackException)
         {
-            report.Refuse(reader.Current.LineNumberToExcl, string.Empty, string.Empty, "holds bytes that are not UTF-8: save the file as UTF-8");
+            report.Refuse(reader.Current.LineNumberToExcl, string.Empty, string.Empty, NotUtf8);
         }
         catch (Exception broken) when (broken is InvalidDataException or NotSupportedException)
         {

@@ -68,8 +68,7 @@ internal sealed class ImportPass(PlantDbContext context, IDatabaseEngine engine,
                     return;
                 }
 
-                ReservoirService.ApplyTo(reservoir, KeepOrigins(fields, ReservoirService.FieldsOf(reservoir)), fluid, fields.Area is null ? null : areas[fields.Area]);
-                (reservoir.Area, reservoir.Fluid) = (null, null);
+                ReservoirService.ApplyTo(reservoir, KeepOrigins(fields, ReservoirService.FieldsOf(reservoir)), fluid.Id, fields.Area is null ? null : areas[fields.Area].Id);
             },
             reservoir => (reservoir.Area, reservoir.Fluid) = (null, null));
         await new TableImport<ReservoirFields, Reservoir>(context, kind, report, options).RunAsync(path, AddAsync, cancellation);
@@ -161,8 +160,7 @@ internal sealed class ImportPass(PlantDbContext context, IDatabaseEngine engine,
             },
             (separator, fields, refusals) =>
             {
-                SeparatorService.ApplyTo(separator, fields, fields.Tag is null ? null : Find(byTag, fields.Tag, refusals));
-                separator.Reservoir = null;
+                SeparatorService.ApplyTo(separator, fields, fields.Tag is null ? null : Find(byTag, fields.Tag, refusals)?.Id);
             });
         await new TableImport<SeparatorFields, Separator>(context, kind, report, options).RunAsync(path, AddAsync, cancellation);
     }
@@ -196,8 +194,7 @@ internal sealed class ImportPass(PlantDbContext context, IDatabaseEngine engine,
             {
                 if (Find(byTag, fields.Tag, refusals) is { } reservoir)
                 {
-                    SeparatorRunService.ApplyTo(run, fields, reservoir);
-                    run.Reservoir = null;
+                    SeparatorRunService.ApplyTo(run, fields, reservoir.Id);
                 }
             });
         await new TableImport<SeparatorRunFields, SeparatorRunEvent>(context, kind, report, options).RunAsync(path, AddAsync, cancellation);
@@ -281,5 +278,5 @@ internal sealed class ImportPass(PlantDbContext context, IDatabaseEngine engine,
 
     private static string Key(string name, int number) => FormattableString.Invariant($"{name}, {number}");
 
-    private static string Key(string name, DateTime at) => FormattableString.Invariant($"{name}, {at:yyyy-MM-ddTHH:mm:ss.FFF}Z");
+    private static string Key(string name, DateTime at) => FormattableString.Invariant($"{name}, {at:yyyy-MM-ddTHH:mm:ss.fff}Z");
 }

@@ -23,12 +23,18 @@ public sealed class ReservoirService(IDbContextFactory<PlantDbContext> contexts,
 
     public static void ApplyTo(Reservoir reservoir, ReservoirFields fields, Fluid fluid, Area? area)
     {
-        reservoir.Name = fields.Name!;
-        reservoir.AreaId = area?.Id;
+        ApplyTo(reservoir, fields, fluid.Id, area?.Id);
         reservoir.Area = area;
-        reservoir.Service = fields.Service;
-        reservoir.FluidId = fluid.Id;
         reservoir.Fluid = fluid;
+    }
+
+    /// <summary>Applies the fields by the ids of what they name, for those who do not track it.</summary>
+    public static void ApplyTo(Reservoir reservoir, ReservoirFields fields, Guid fluidId, Guid? areaId)
+    {
+        reservoir.Name = fields.Name!;
+        reservoir.AreaId = areaId;
+        reservoir.Service = fields.Service;
+        reservoir.FluidId = fluidId;
         reservoir.Shape = Rule.Parse<TankShape>(fields.Shape);
         reservoir.LengthMm = fields.LengthMm;
         reservoir.WidthMm = fields.WidthMm;

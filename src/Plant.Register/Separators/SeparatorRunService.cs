@@ -25,10 +25,9 @@ public sealed class SeparatorRunService(IDbContextFactory<PlantDbContext> contex
         EndedAt = fields.EndedAt?.UtcDateTime,
     };
 
-    public static void ApplyTo(SeparatorRunEvent run, SeparatorRunFields fields, Reservoir reservoir)
+    public static void ApplyTo(SeparatorRunEvent run, SeparatorRunFields fields, Guid reservoirId)
     {
-        run.ReservoirId = reservoir.Id;
-        run.Reservoir = reservoir;
+        run.ReservoirId = reservoirId;
         run.EndedAt = fields.EndedAt?.UtcDateTime;
     }
 
@@ -64,7 +63,11 @@ public sealed class SeparatorRunService(IDbContextFactory<PlantDbContext> contex
     protected override SeparatorRunEvent Make(Guid id, SeparatorRunFields fields, References references, Actor actor) =>
         Make(id, fields, references.Separator!, references.Reservoir!);
 
-    protected override void Apply(SeparatorRunEvent record, SeparatorRunFields fields, References references) => ApplyTo(record, fields, references.Reservoir!);
+    protected override void Apply(SeparatorRunEvent record, SeparatorRunFields fields, References references)
+    {
+        ApplyTo(record, fields, references.Reservoir!.Id);
+        record.Reservoir = references.Reservoir;
+    }
 
     protected override SeparatorRunFields ToFields(SeparatorRunEvent record) => FieldsOf(record, record.Separator?.Code, record.Reservoir?.Tag);
 

@@ -23,8 +23,14 @@ public sealed class SeparatorService(IDbContextFactory<PlantDbContext> contexts,
 
     public static void ApplyTo(Separator separator, SeparatorFields fields, Reservoir? reservoir)
     {
-        separator.ReservoirId = reservoir?.Id;
+        ApplyTo(separator, fields, reservoir?.Id);
         separator.Reservoir = reservoir;
+    }
+
+    /// <summary>Applies the fields by the id of what they name, for those who do not track it.</summary>
+    public static void ApplyTo(Separator separator, SeparatorFields fields, Guid? reservoirId)
+    {
+        separator.ReservoirId = reservoirId;
         separator.Kind = Rule.Parse<SeparatorKind>(fields.Kind)!.Value;
         separator.FlowLPerMin = fields.FlowLPerMin;
         separator.Efficiency = fields.Efficiency;

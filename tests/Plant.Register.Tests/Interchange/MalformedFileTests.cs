@@ -67,7 +67,7 @@ public sealed class MalformedFileTests(Plants plants)
         { Sample, SampleHead + "S1,R1,2026-01-01T00:00:00Z,return,kf-coulometric,-1,,1,\n", 2, "waterPpm", "-1", "between 0 and" },
         { Sample, SampleHead + "S1,R1,2026-01-01T00:00:00Z,return,kf-coulometric,100,,1,\nS1,R2,2026-01-01T00:00:00Z,return,kf-coulometric,101,,2,\n", 3, "tag", "R2", "one bottle, one reservoir" },
         { "drains.csv", DrainHead + "R1,2026-01-01T00:00:00Z,,\n", 2, "waterL", "", "may not be empty" },
-        { "drains.csv", DrainHead + "R1,2026-01-01T00:00:00Z,1,\nR1,2026-01-01T01:00:00+01:00,2,\n", 3, "tag", "R1, 2026-01-01T00:00:00.Z", "line 2" },
+        { "drains.csv", DrainHead + "R1,2026-01-01T00:00:00Z,1,\nR1,2026-01-01T01:00:00+01:00,2,\n", 3, "tag", "R1, 2026-01-01T00:00:00.000Z", "line 2" },
         { "topups.csv", "tag,addedAt,oilL\nR1,2026-01-01T00:00:00Z,-4\n", 2, "oilL", "-4", "between 0 and" },
         { "separators.csv", "code,kind,efficiency\nC1,coalescer,90\n", 2, "efficiency", "90", "between 0 and 1" },
         { "separators.csv", "code,kind,portable\nC1,coalescer,yes\n", 2, "portable", "yes", "true or false" },
