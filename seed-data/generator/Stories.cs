@@ -24,8 +24,8 @@ public static class Stories
         yield return new("DS-LUB-04", 402, "The same on the sister station a year earlier; plugged after a month, then dried with VD-01.", "Past history: the ingress of today is the usual one.") { Change = u => u with { Leaks = [new(402, 371, 9_000, 9_000)] } };
         yield return new("PH-TG-01", 330, "A gland seal wears: steam condenses in the oil, 25 g/day at first, 2 kg/day now.", "Ingress grows; the oil passed its limit; drains bring more each month.") { Change = u => u with { Leaks = [new(330, 0, 25, 2_000)], CapacityL = 160 } };
         yield return new("WE-PRS-02", 118, "The desiccant breather is spent as the wet season begins: the tank breathes the mist of the wet end.", "Water rises without a leak; free when cold; a new breather and an absorbent or vacuum treatment.") { Change = u => u with { BreatherFailsDay = 118 } };
-        yield return new("WE-LUB-02", 262, "Water comes in steadily, the oil is at saturation: its trend is flat. Nobody has drained since July.", "Flat is not calm: settled water is near its capacity, drain at once.") { Change = u => u with { Leaks = [new(262, 0, 4_200, 4_200)], LastDrainDay = 146 } };
-        yield return new("PL-WSH-02", 700, "Hosing down reaches the vent of the gearbox.", "Free water, a litre or so a drain; raise and shield the vent.") { Change = u => u with { Leaks = [new(731, 0, 45, 45)], DrainDays = 30, SuctionMm = 60, CapacityL = 3.5 } };
+        yield return new("WE-LUB-02", 262, "Water comes in steadily, the oil is at saturation: its trend is flat. Nobody has drained for five months.", "Flat is not calm: settled water is near its capacity, drain at once.") { Change = u => u with { Leaks = [new(262, 0, 4_200, 4_200)], LastDrainDay = 146 } };
+        yield return new("PL-WSH-02", null, "Hosing down reaches the vent of the gearbox.", "Free water, a litre or so a drain; raise and shield the vent.") { Change = u => u with { Leaks = [new(731, 0, 45, 45)], DrainDays = 30, SuctionMm = 60, CapacityL = 3.5 } };
         yield return new("PH-CRU-01", 210, "Rain runs down the shaft of a crusher that stands outside over the weekend.", "Free water in a thick, cold oil that gives it up slowly.") { Change = u => u with { Leaks = [new(210, 0, 60, 110)], CapacityL = 12 } };
         yield return new("CV-CMP-02", 520, "A compressor loafs too cool and drops condensate into its oil.", "Free water; drain weekly, raise the running temperature.") { Change = u => u with { OperatingC = 58, Leaks = [new(520, 0, 28, 34)], DrainDays = 21, CapacityL = 1.8 } };
         yield return new("PL-PUL-03", 155, "Stuffing box spray gets past the shaft seal.", "Free water, ingress changed in the summer.") { Change = u => u with { Leaks = [new(155, 0, 180, 180)], DrainDays = 30 } };
@@ -44,7 +44,7 @@ public static class Stories
         yield return new("TR-MAIN-02", 430, "A transformer's gasket lets moisture in.", "Slow rise to its limit of 25 mg/kg; a date for drying.") { Change = u => u with { Leaks = [new(430, 0, 0.3, 0.6)] } };
         yield return new("TR-NES-02", 420, "A natural ester that holds ten times what mineral oil would.", "Many mg/kg, and dry; the limit is what counts.") { Change = u => u with { Leaks = [new(420, 0, 0.9, 0.9)] } };
         yield return new("TR-SIL-01", 330, "A silicone-filled unit with a tired seal.", "Near saturation when cold.") { Change = u => u with { Leaks = [new(330, 0, 0.45, 0.45)], SampleDays = 91 } };
-        yield return new("PH-DG-01", 380, "Rain finds the vent of a standby diesel day tank; the last drain was in June.", "Free water under the fuel of an engine that must start: drain now.") { Change = u => u with { SettledAtStartL = 2, Leaks = [new(380, 0, 55, 55)], CapacityL = 10, LastDrainDay = 165 } };
+        yield return new("PH-DG-01", 380, "Rain finds the vent of a standby diesel day tank; nobody has drained it for eight months.", "Free water under the fuel of an engine that must start: drain now.") { Change = u => u with { SettledAtStartL = 2, Leaks = [new(380, 0, 55, 55)], CapacityL = 10, LastDrainDay = 165 } };
         yield return new("TF-DSL-01", null, "A bulk tank breathes moist air by an open vent, summer and winter.", "Free water at the bottom, a few litres a quarter.") { Change = u => u with { SettledAtStartL = 6, Leaks = [new(731, 0, 110, 110)], CapacityL = 24 } };
     }
 
@@ -53,7 +53,7 @@ public static class Stories
         yield return new("PL-REF-03", 52, "A bottle was not clean: one result near 900 mg/kg between calm ones.", "One doubtful result, kept and not believed; it changes no date.") { Change = u => u with { DirtyBottleDay = 52, SampleDays = 28 } };
         yield return new("CV-WND-03", 45, "Commissioned lately; no sample was ever taken.", "Unknown: nothing to go by; take a sample.") { Change = u => u with { SampleDays = 0 } };
         yield return new("CV-BAL-03", null, "A cold hall and free weekends: water falls out every Saturday and is taken up again on Monday.", "Dry when running, free when cold.") { Change = u => u with { Fill = 0.85, ColdestC = 8, RhPercent = 65 } };
-        yield return new("WE-FAN-03", 88, "Nobody has sampled it since the end of summer (eleven others too).", "Sample overdue.") { Change = u => u };
+        yield return new("WE-FAN-03", 88, "Nobody has sampled it for three months; eleven others are in the same state.", "Sample overdue.") { Change = u => u };
     }
 
     private static IEnumerable<Story> Sensors()
