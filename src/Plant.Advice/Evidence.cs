@@ -52,7 +52,7 @@ internal sealed record Evidence
         var known = Known(history, asOf);
         var oil = OilState.Of(known, working);
         var observations = Ledger.Observations.Of(known, oil.Fluid, asOf);
-        var water = OilWater.Estimate(observations, asOf, LastReset(known, asOf), oil.SaturationPpm * 1.1);
+        var water = OilWater.Estimate(observations, asOf, LastReset(known, asOf), oil.SaturationPpm * 1.1, oil.SaturationColdestPpm);
         var capacity = Capacity.LitresOf(known, oil.WaterGoes, working);
         var limit = known.WaterLimitPpm ?? known.Fluid.WaterLimitPpm;
         var evidence = new Evidence
@@ -73,12 +73,18 @@ internal sealed record Evidence
     {
         var intervals = new BalanceIntervals(History, Oil, Observations, AsOf).All();
         var ingress = Oil.MassKg is { } mass && intervals.Count > 0 ? Ledger.Ingress.Estimate(intervals, mass) : null;
+        var surge = Surge.Of(Observations, Water, Oil, History.Drains.Count > 0 ? History.Drains[^1].At : null);
+        if (surge is { Chance: > 0.5 } sure && ingress is not null && sure.GPerDay > ingress.MedianGPerDay)
+        {
+            ingress = ingress.Surged(sure);
+        }
+
         var settled = Observations.Count == 0 && History.Drains.Count == 0
             ? null
-            : SettledWater.Estimate(History, intervals, ingress, SurplusShare(), AsOf);
+            : SettledWater.Estimate(History, intervals, ingress, Surplus(), RedissolvedLPerDay(), AsOf);
         if (working is not null && Water is { } water)
         {
-            working.Add("water in the circulating oil", FormattableString.Invariant($"robust level of {Observations.Count(o => !o.Outlying)} observations, carried to {AsOf:yyyy-MM-dd}; ± {Normal.Z90 * water.SdPpm:0} mg/kg at 90 %"),
+            working.Add("water in the circulating oil", FormattableString.Invariant($"robust level of {Observations.Count(o => !o.Outlying)} observations, carried to {AsOf:yyyy-MM-dd}; 90 % {water.Low90Ppm:0}–{water.High90Ppm:0} mg/kg"),
                 water.WaterPpm, "mg/kg", $"Karl Fischer repeatability, and sampling scatter 7 % + 5 mg/kg: {Priors.Source}");
             working.Add("trend", "Theil–Sen slope of the newest observations, shrunk by its own error", water.SlopePpmPerDay, "mg/kg/day", "Theil 1950, Sen 1968");
         }
@@ -91,11 +97,11 @@ internal sealed record Evidence
 
         if (working is not null && settled is not null)
         {
-            working.Add("settled water", FormattableString.Invariant($"{settled.LeftL:0.##} L left by the last drain + {settled.RateLPerDay:0.###} L/day · {settled.SinceDays:0} days; 90 % {settled.Low90L:0.##}–{settled.High90L:0.##} L"),
+            working.Add("settled water", FormattableString.Invariant($"left by the last drain, and gathered since at {settled.RateLPerDay:0.###} L/day; 90 % {settled.Low90L:0.##}–{settled.High90L:0.##} L"),
                 settled.MedianL, "L", $"drained volumes; a drain takes 90 ± 8 %: {Priors.Source}");
         }
 
-        return this with { Ingress = ingress, Settled = settled };
+        return this with { Ingress = ingress, Settled = surge is null || settled is null ? settled : settled with { Surge = surge, SurgeDays = Math.Max(0, (AsOf - surge.From).TotalDays) } };
     }
 
     private Evidence WithChances(Working? working)
@@ -104,15 +110,19 @@ internal sealed record Evidence
         var settledFree = Settled is { } settled && Oil.VolumeL is { } volume ? settled.ChanceAbove(FreeShare * volume, 0) : 0;
         if (Water is { } water && Oil.SaturationPpm is { } saturation && Oil.SaturationColdestPpm is { } cold)
         {
-            now = Either(Above(water, saturation), settledFree);
-            coldest = Math.Max(now.Value, Either(Above(water, cold), settledFree));
-            near = Above(water, 0.8 * cold);
+            now = Either(CrackleTest.Update(water.ChanceAbove(saturation, Oil.SaturationLogSd), History.Samples, AsOf), settledFree);
+            coldest = Math.Max(now.Value, Either(water.ChanceAbove(cold, Oil.SaturationLogSd), settledFree));
+            near = water.ChanceAbove(0.8 * cold, Oil.SaturationLogSd);
             working?.Add("chance of free water now", FormattableString.Invariant($"1 − (1 − Φ(ln({water.WaterPpm:0}/{saturation:0})/σ))·(1 − {settledFree:0.###}), σ from the content and the saturation"), now, "1", Citations.Normal);
             working?.Add("chance of free water at the coldest temperature", FormattableString.Invariant($"the same against {cold:0} mg/kg"), coldest, "1", Citations.Normal);
         }
         else if (settledFree > 0.5)
         {
             now = coldest = settledFree;
+        }
+        else if (Water is null && CrackleTest.Newest(History.Samples, AsOf) == true)
+        {
+            now = coldest = CrackleTest.Update(CrackleTest.Prior, History.Samples, AsOf);
         }
 
         return this with { FreeNow = now, FreeColdest = coldest, AboveNearSaturation = near };
@@ -131,22 +141,37 @@ internal sealed record Evidence
         return this with { Plan = plan, DehydrateBy = dehydrate };
     }
 
-    /// <summary>How full the oil is, as the share of new water that it will not take up.</summary>
-    private double SurplusShare()
+    /// <summary>Share of new water that the oil does not take up: on average since the last drain, and now; and the chance that it lets some fall when cold.</summary>
+    private (double Since, double Now, double Cold) Surplus()
     {
         if (Water is not { } water || Oil.SaturationPpm is not { } saturation)
         {
-            return 0;
+            return (0, 0, 0);
         }
 
-        return Normal.Cdf(Math.Log(water.WaterPpm / (0.9 * saturation)) / Math.Sqrt((Oil.SaturationLogSd * Oil.SaturationLogSd) + 0.01));
+        // cold stands make water fall out of oil that is unsaturated while warm
+        var aboveCold = Oil.SaturationColdestPpm is { } cold ? water.ChanceAbove(cold, Oil.SaturationLogSd) : 0;
+        var least = Priors.ColdStandShare * aboveCold;
+        var now = Math.Max(least, water.ChanceAbove(0.9 * saturation, Oil.SaturationLogSd));
+        var from = History.Drains.Count > 0 ? History.Drains[^1].At : DateTime.MinValue;
+        double sum = now, count = 1;
+        foreach (var observation in Observations)
+        {
+            if (observation.At > from && !observation.Outlying)
+            {
+                sum += Math.Max(least, Normal.Cdf(Math.Log(observation.WaterPpm / (0.9 * saturation)) / Math.Sqrt((Oil.SaturationLogSd * Oil.SaturationLogSd) + 0.01)));
+                count++;
+            }
+        }
+
+        return (sum / count, now, aboveCold);
     }
 
-    private double Above(OilWater water, double saturationPpm)
-    {
-        var spread = Math.Sqrt((water.LogSd * water.LogSd) + (Oil.SaturationLogSd * Oil.SaturationLogSd));
-        return Normal.Cdf(Math.Log(water.WaterPpm / saturationPpm) / spread);
-    }
+    /// <summary>What warm unsaturated oil may take back from the bottom in a day [L/day].</summary>
+    private double RedissolvedLPerDay() =>
+        Water is { } water && Oil.SaturationPpm is { } saturation && Oil.MassKg is { } mass
+            ? Priors.RedissolvedPerDay * Math.Max(0, saturation - water.WaterPpm) * mass / 1e6 / Priors.WaterKgPerL
+            : 0;
 
     private static double Either(double one, double other) => 1 - ((1 - one) * (1 - other));
 

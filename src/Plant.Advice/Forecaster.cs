@@ -20,8 +20,6 @@ public readonly record struct ForecastDay(
 /// <summary>The same balance run forward.</summary>
 public static class Forecaster
 {
-    private const double Z50 = 0.6744897501960817;
-
     /// <summary>Forecast by the day, if nobody does anything.</summary>
     /// <param name="history">The records.</param>
     /// <param name="asOf">The time (UTC).</param>
@@ -34,16 +32,9 @@ public static class Forecaster
         var rows = new List<ForecastDay>(days + 1);
         for (var day = 0; day <= days; day++)
         {
-            double? mean = null, low90 = null, high90 = null, low50 = null, high50 = null;
-            if (evidence.Water is { } water)
-            {
-                var (level, sd) = LimitForecast.At(water, day, evidence.CeilingPpm);
-                var spread = Math.Sqrt(Math.Log(1 + ((sd / level) * (sd / level))));
-                (mean, low90, high90) = (level, level * Math.Exp(-Normal.Z90 * spread), level * Math.Exp(Normal.Z90 * spread));
-                (low50, high50) = (level * Math.Exp(-Z50 * spread), level * Math.Exp(Z50 * spread));
-            }
-
-            rows.Add(new ForecastDay(day, mean, low90, high90, low50, high50,
+            var cases = evidence.Water is { } water ? LimitForecast.At(water, day, evidence.CeilingPpm) : null;
+            double? Ppm(double chance) => cases is null ? null : OilWater.Quantile(cases, chance);
+            rows.Add(new ForecastDay(day, Ppm(0.5), Ppm(0.05), Ppm(0.95), Ppm(0.25), Ppm(0.75),
                 evidence.Settled?.At(day, 0.5), evidence.Settled?.At(day, 0.05), evidence.Settled?.At(day, 0.95)));
         }
 

@@ -1,5 +1,6 @@
 using System.Globalization;
 using Plant.Advice.Dehydration;
+using Plant.Advice.Ledger;
 using Plant.Physics;
 using Plant.Physics.Fluids;
 
@@ -20,7 +21,7 @@ internal static class Statement
             working?.Add("dehydration", why, null, "", "common practice");
         }
 
-        var last = evidence.Observations.Count > 0 ? evidence.Observations[^1].At : (DateTime?)null;
+        var last = Newest(evidence);
         var drainsSoon = evidence.Plan.By is { } by && (by - evidence.AsOf).TotalDays <= ActWithinDays;
         return new Assessment
         {
@@ -59,6 +60,13 @@ internal static class Statement
             Actions = Actions(evidence, dehydration, why, drainsSoon),
             Cautions = Cautions.For(evidence.History, drainsSoon, dehydration),
         };
+    }
+
+    private static DateTime? Newest(Evidence evidence)
+    {
+        var observed = evidence.Observations.Count > 0 ? evidence.Observations[^1].At : (DateTime?)null;
+        var sampled = evidence.History.Samples.Count > 0 ? evidence.History.Samples[^1].TakenAt : (DateTime?)null;
+        return observed > sampled || sampled is null ? observed : sampled;
     }
 
     private static Condition Judge(Evidence evidence) =>
@@ -103,7 +111,9 @@ internal static class Statement
         var water = evidence.Water;
         if (water is null)
         {
-            text.Add(evidence.Settled is { MedianL: > 0.1 } found
+            text.Add(condition == Condition.FreeWater && CrackleTest.Newest(evidence.History.Samples, evidence.AsOf) == true
+                ? "The newest sample crackled on the hot plate: it holds undissolved water; how much is not known."
+                : evidence.Settled is { MedianL: > 0.1 } found
                 ? $"No usable sample; the drains say about {Litres(found.MedianL)} of water stand in it."
                 : "No usable sample: nothing to go by. Take one from the return line while it runs.");
         }
@@ -174,6 +184,11 @@ internal static class Statement
         if (dehydration is { } kind)
         {
             actions.Add($"Dehydrate with {MethodChoice.Words(kind)}{(drainsSoon ? " after the drain" : "")}: {why}.");
+        }
+
+        if (evidence.Water is { NewestContradicts: true })
+        {
+            actions.Add("Take another sample: the newest result is far above those before it, so it is a dirty bottle or the start of a leak.");
         }
 
         if (Sampling.IsOverdue(evidence.History, evidence.AsOf))

@@ -2,7 +2,7 @@ using Plant.Advice.Ledger;
 
 namespace Plant.Advice.Dehydration;
 
-/// <summary>Circulating water against its limit.</summary>
+/// <summary>Circulating water ahead, and against its limit.</summary>
 public static class LimitForecast
 {
     /// <summary>Chance at which a limit counts as passed [0 to 1].</summary>
@@ -12,41 +12,45 @@ public static class LimitForecast
     private const double WidestShare = 0.35;
 
     // a trend is followed for so long and then taken to have met its balance with the headspace [days]
-    private const double TrendDays = 120;
+    private const double TrendDays = 90;
 
-    /// <summary>Mean content some days from now.</summary>
+    /// <summary>What may be the case some days from now, if nobody does anything.</summary>
     /// <param name="water">Water in the oil now.</param>
-    /// <param name="days">Days from now [days].</param>
+    /// <param name="daysAhead">Days from now [days].</param>
     /// <param name="ceilingPpm">Content that a rise ends at [mg/kg], or null.</param>
-    /// <returns>Mean [mg/kg] and standard deviation [mg/kg].</returns>
-    public static (double MeanPpm, double SdPpm) At(OilWater water, double days, double? ceilingPpm)
+    /// <returns>The cases with their weights.</returns>
+    public static IReadOnlyList<WaterCase> At(OilWater water, double daysAhead, double? ceilingPpm)
     {
         ArgumentNullException.ThrowIfNull(water);
-        var reach = TrendDays * (1 - Math.Exp(-days / TrendDays));
-        var mean = water.WaterPpm + (water.SlopePpmPerDay * reach);
-        if (ceilingPpm is { } ceiling)
+        var reach = TrendDays * (1 - Math.Exp(-daysAhead / TrendDays));
+        var cases = new WaterCase[water.Cases.Count];
+        for (var i = 0; i < cases.Length; i++)
         {
-            mean = Math.Min(mean, Math.Max(ceiling, water.WaterPpm));
+            var now = water.Cases[i];
+            var median = now.WaterPpm + (water.SlopePpmPerDay * reach);
+            if (ceilingPpm is { } ceiling)
+            {
+                median = Math.Min(median, Math.Max(ceiling, now.WaterPpm));
+            }
+
+            median = Math.Max(median, Math.Max(1, 0.2 * now.WaterPpm));
+            var added = Math.Min(
+                (water.WanderPpm2PerDay * daysAhead) + Math.Pow(water.SlopeSdPpmPerDay * reach, 2),
+                Math.Pow(LocalLevel.WidestShare * median, 2));
+            cases[i] = new WaterCase(now.Weight, median, Math.Sqrt((now.LogSd * now.LogSd) + Math.Log(1 + (added / (median * median)))));
         }
 
-        mean = Math.Max(mean, Math.Max(1, 0.2 * water.WaterPpm));
-        var variance = (water.SdPpm * water.SdPpm) + Math.Pow(water.SlopeSdPpmPerDay * reach, 2) + (water.WanderPpm2PerDay * Math.Min(days, 180));
-        // circulating oil neither loses all of its water nor holds much more than it can: the spread is bounded
-        return (mean, Math.Min(Math.Sqrt(variance), Math.Max(water.SdPpm, WidestShare * mean)));
+        return cases;
     }
 
     /// <summary>Chance that the content is above a limit some days from now.</summary>
     /// <param name="water">Water in the oil now.</param>
     /// <param name="limitPpm">Limit [mg/kg].</param>
-    /// <param name="days">Days from now [days].</param>
+    /// <param name="daysAhead">Days from now [days].</param>
     /// <param name="ceilingPpm">Content that a rise ends at [mg/kg], or null.</param>
     /// <returns>Chance [0 to 1].</returns>
-    public static double ChanceAbove(OilWater water, double limitPpm, double days, double? ceilingPpm)
-    {
-        var (mean, sd) = At(water, days, ceilingPpm);
-        var spread = Math.Sqrt(Math.Log(1 + Math.Pow(sd / mean, 2)));
-        return limitPpm <= 0 ? 1 : 1 - Normal.Cdf(Math.Log(limitPpm / mean) / spread);
-    }
+    public static double ChanceAbove(OilWater water, double limitPpm, double daysAhead, double? ceilingPpm) =>
+        OilWater.ChanceAbove(At(water, daysAhead, ceilingPpm), limitPpm, 0);
 
     /// <summary>When the chance passes 5 %.</summary>
     /// <param name="water">Water in the oil now.</param>

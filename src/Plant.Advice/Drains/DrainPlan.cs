@@ -1,3 +1,5 @@
+using Plant.Advice.Ledger;
+
 namespace Plant.Advice.Drains;
 
 /// <summary>When a reservoir must be drained by the plant's planning rule.</summary>
@@ -24,7 +26,7 @@ public sealed record DrainPlan(double? IntervalDays, DateTime? By, DateTime? Ear
         ArgumentNullException.ThrowIfNull(settled);
         ArgumentNullException.ThrowIfNull(rule);
         var allowed = capacityL * rule.CapacityShare;
-        var steady = settled with { LeftL = settled.RateLPerDay <= 0 ? 0 : Math.Min(settled.LeftL, allowed * 0.1), SinceDays = 0 };
+        var steady = settled with { SinceDays = 0, Surge = null, NowL = Math.Min((1 - Priors.DrainEfficiency) * settled.NowL, 0.1 * allowed) };
         var interval = Longest(days => steady.ChanceAbove(allowed, days) <= rule.Risk);
         var ahead = Longest(days => settled.ChanceAbove(allowed, days) <= rule.Risk);
         if (ahead is null)

@@ -6,7 +6,6 @@ internal sealed class BalanceIntervals(ReservoirHistory history, OilState oil, I
 {
     private const double HorizonDays = 540;
     private const double ShortestDays = 5;
-    private const double WaterKgPerL = 0.998;
 
     private readonly List<Observation> usable = [.. observations.Where(o => !o.Outlying)];
 
@@ -43,8 +42,8 @@ internal sealed class BalanceIntervals(ReservoirHistory history, OilState oil, I
             var settled = Math.Max(0, (drained / Priors.DrainEfficiency) - left);
             var (uptake, uptakeSd, full) = Uptake(from, drains[i].At);
             var settledSd = (0.1 * settled) + 0.05 + (0.5 * left);
-            var ingress = ((settled * WaterKgPerL * 1000) + uptake) / days;
-            var sd = Math.Sqrt(Math.Pow(settledSd * WaterKgPerL * 1000, 2) + Math.Pow(uptakeSd, 2)) / days;
+            var ingress = ((settled * Priors.WaterKgPerL * 1000) + uptake) / days;
+            var sd = Math.Sqrt(Math.Pow(settledSd * Priors.WaterKgPerL * 1000, 2) + Math.Pow(uptakeSd, 2)) / days;
             found.Add(new BalanceInterval(from, drains[i].At, ingress, sd, settled / days, full && drained < Priors.SmallestDrainL));
             left = Left(drained);
             from = drains[i].At;
@@ -72,7 +71,9 @@ internal sealed class BalanceIntervals(ReservoirHistory history, OilState oil, I
 
             var (uptake, sd, full) = Uptake(points[i].At, points[j].At);
             var days = (points[j].At - points[i].At).TotalDays;
-            yield return new BalanceInterval(points[i].At, points[j].At, uptake / days, sd / days, null, full);
+            // a fall from above the cold saturation says that water went somewhere, not that little came in
+            var fell = uptake <= 0 && oil.SaturationColdestPpm is { } cold && points[i].WaterPpm > cold;
+            yield return new BalanceInterval(points[i].At, points[j].At, uptake / days, sd / days, null, full || fell);
             i = j;
         }
     }

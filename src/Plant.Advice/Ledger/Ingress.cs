@@ -16,6 +16,12 @@ public sealed record Ingress(double MedianGPerDay, double Low90GPerDay, double H
     // an interval's own rate scatters about the mean rate: weather, load, washing down
     private const double Scatter = 0.35;
 
+    // between samples water may have settled unseen in a cold stand: a higher rate is less unlikely than a lower one
+    private const double UnseenScatter = 1.5;
+
+    // what all intervals share (humidity exchange, drain efficiency, solubility) does not average out: so many count in full
+    private const double MostIntervals = 4;
+
     // a change is believed at odds that keep false alarms to about one in a reservoir's twenty years
     private const double ChangeLogLikelihood = 7;
     private const double ChangeRatio = 2.5;
@@ -32,6 +38,7 @@ public sealed record Ingress(double MedianGPerDay, double Low90GPerDay, double H
         var step = Math.Log(HighestPpmPerDay / LowestPpmPerDay) / (Cells - 1);
         var scale = massKg / 1000;
         var highest = double.NegativeInfinity;
+        var temper = Temper(intervals, start);
         for (var cell = 0; cell < Cells; cell++)
         {
             var ppmPerDay = LowestPpmPerDay * Math.Exp(step * cell);
@@ -39,7 +46,7 @@ public sealed record Ingress(double MedianGPerDay, double Low90GPerDay, double H
             var log = -0.5 * z * z;
             for (var i = start; i < intervals.Count; i++)
             {
-                log += LogLikelihood(intervals[i], ppmPerDay * scale, Age(intervals, i));
+                log += LogLikelihood(intervals[i], ppmPerDay * scale, temper * Age(intervals, i));
             }
 
             weight[cell] = log;
@@ -74,13 +81,34 @@ public sealed record Ingress(double MedianGPerDay, double Low90GPerDay, double H
         return new Ingress(At(weight, 0.5), At(weight, 0.05), At(weight, 0.95), changedAt, earlier, intervals.Count - start);
     }
 
+    /// <summary>The same after a surge: between what it was and the most that the surge may be.</summary>
+    /// <param name="surge">The surge.</param>
+    /// <returns>The estimate.</returns>
+    public Ingress Surged(Surge surge)
+    {
+        ArgumentNullException.ThrowIfNull(surge);
+        return new Ingress(Math.Sqrt(MedianGPerDay * surge.GPerDay), MedianGPerDay, Math.Max(High90GPerDay, surge.GPerDay * 2), surge.From, MedianGPerDay, Intervals);
+    }
+
     /// <summary>Old intervals say less of today: half a year halves their weight.</summary>
     private static double Age(IReadOnlyList<BalanceInterval> intervals, int i) =>
         Math.Pow(0.5, (intervals[^1].To - intervals[i].To).TotalDays / 180);
 
+    private static double Temper(IReadOnlyList<BalanceInterval> intervals, int start)
+    {
+        var sum = 0.0;
+        for (var i = start; i < intervals.Count; i++)
+        {
+            sum += Age(intervals, i);
+        }
+
+        return Math.Min(1, MostIntervals / sum);
+    }
+
     private static double LogLikelihood(BalanceInterval interval, double rateGPerDay, double weight)
     {
-        var sd = Math.Sqrt((interval.SdGPerDay * interval.SdGPerDay) + Math.Pow(Scatter * rateGPerDay, 2));
+        var scatter = interval.SettledLPerDay is null && rateGPerDay > interval.IngressGPerDay ? UnseenScatter : Scatter;
+        var sd = Math.Sqrt((interval.SdGPerDay * interval.SdGPerDay) + Math.Pow(scatter * rateGPerDay, 2));
         var z = (interval.IngressGPerDay - rateGPerDay) / sd;
         if (interval.LowerBoundOnly)
         {

@@ -11,6 +11,7 @@ public static class Observations
     private const double BottomShare = 0.25;
     private const double ActivitySd = 0.03;
     private const double OutlierDistance = 3.5;
+    private const int SensorWeeks = 16;
 
     /// <summary>Observations known at a time, in order, replicates averaged, contradicted ones marked.</summary>
     /// <param name="history">The records.</param>
@@ -75,22 +76,50 @@ public static class Observations
             return;
         }
 
-        var newest = history.Readings.Where(r => r.At <= asOf && r.WaterActivity is not null).Select(r => (DateTime?)r.At).LastOrDefault();
-        if (newest is not { } last)
+        // three-day medians a week apart, newest first: one pass backwards, however many readings there are
+        DateTime? last = null;
+        var week = new List<double>();
+        var begun = 0;
+        for (var i = history.Readings.Count - 1; i >= 0; i--)
         {
-            return;
+            var reading = history.Readings[i];
+            if (reading.At > asOf || reading.WaterActivity is not { } activity)
+            {
+                continue;
+            }
+
+            last ??= reading.At;
+            var age = (last.Value - reading.At).TotalDays;
+            if (age >= 7 * SensorWeeks)
+            {
+                break;
+            }
+
+            if ((int)(age / 7) != begun)
+            {
+                AddWeek(found, week, last.Value.AddDays(-7 * begun), fluid);
+                begun = (int)(age / 7);
+            }
+
+            if (age % 7 < 3)
+            {
+                week.Add(activity * fluid.SaturationPpm((reading.OilTemperatureC ?? history.OperatingTemperatureC ?? 40) + Constants.ZeroCelsiusK));
+            }
         }
 
-        for (var week = 0; week < 16; week++)
+        if (last is { } newest)
         {
-            var to = last.AddDays(-7 * week);
-            var values = history.Readings.Where(r => r.At <= to && r.At > to.AddDays(-3) && r.At <= asOf && r.WaterActivity is not null)
-                .Select(r => r.WaterActivity!.Value * fluid.SaturationPpm((r.OilTemperatureC ?? history.OperatingTemperatureC ?? 40) + Constants.ZeroCelsiusK)).ToList();
-            if (values.Count > 0)
-            {
-                var middle = Robust.Median(values);
-                found.Add(new Observation(to, middle, Math.Max(Priors.SamplingPpm, Priors.SaturationLogSd(fluid) * middle), 0, false));
-            }
+            AddWeek(found, week, newest.AddDays(-7 * begun), fluid);
+        }
+    }
+
+    private static void AddWeek(List<Observation> found, List<double> week, DateTime at, FluidModel fluid)
+    {
+        if (week.Count > 0)
+        {
+            var middle = Robust.Median(week);
+            found.Add(new Observation(at, middle, Math.Max(Priors.SamplingPpm, Priors.SaturationLogSd(fluid) * middle), 0, false));
+            week.Clear();
         }
     }
 

@@ -29,6 +29,27 @@ public static class Priors
     /// <summary>Smallest drained volume that can be told from nothing [L].</summary>
     public const double SmallestDrainL = 0.02;
 
+    /// <summary>Leaks that start in a year, for planning [1/year].</summary>
+    public const double LeaksPerYear = 0.25;
+
+    /// <summary>Share of the time in which the oil stands cold or is still filling up again after it [1].</summary>
+    public const double ColdStandShare = 0.12;
+
+    /// <summary>Share of the undissolved water that settles in a day [1/day].</summary>
+    public const double ClearingPerDay = 2;
+
+    /// <summary>Share of the missing water that warm oil takes back from the bottom in a day [1/day].</summary>
+    public const double RedissolvedPerDay = 0.02;
+
+    /// <summary>Share of the ingress that settles in oil that is above its cold saturation and is never drained [1].</summary>
+    public const double UndrainedShare = 0.35;
+
+    /// <summary>Density of water [kg/L].</summary>
+    public const double WaterKgPerL = 0.998;
+
+    /// <summary>By how much a leak multiplies the ingress: five equally likely values [1].</summary>
+    public static readonly double[] LeakFactors = [2.8, 5.6, 11, 22, 43];
+
     /// <summary>Exchange of humidity with the headspace [1/day].</summary>
     /// <param name="breather">How the reservoir breathes.</param>
     /// <returns>Rate [1/day].</returns>
