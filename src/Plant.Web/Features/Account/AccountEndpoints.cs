@@ -1,4 +1,5 @@
 using System.Security.Claims;
+using Microsoft.AspNetCore.Antiforgery;
 using Microsoft.AspNetCore.Http.HttpResults;
 using Microsoft.AspNetCore.Identity;
 using Microsoft.AspNetCore.Mvc;
@@ -68,8 +69,14 @@ public static class AccountEndpoints
             : Back("/account/first", outcome.Message ?? outcome.Refusals[0].Field + " " + outcome.Refusals[0].Reason);
     }
 
-    private static async Task<RedirectHttpResult> SignOutAsync(SignInManager<PlantUser> signIn, HttpContext context)
+    private static async Task<IResult> SignOutAsync(SignInManager<PlantUser> signIn, IAntiforgery antiforgery, HttpContext context)
     {
+        // no field is bound here, so the framework would not check the token by itself
+        if (!await antiforgery.IsRequestValidAsync(context))
+        {
+            return TypedResults.BadRequest();
+        }
+
         await signIn.SignOutAsync();
         context.Response.Headers["Clear-Site-Data"] = "\"storage\"";
         return TypedResults.LocalRedirect("/account/sign-in");
