@@ -47,6 +47,9 @@ public sealed class Visit : IAsyncDisposable
         await Page.WaitForURLAsync(address => !address.Contains("/account/", StringComparison.Ordinal));
     }
 
+    /// <summary>Waits until the page answers to typing: before that it is only a picture of itself.</summary>
+    public Task LiveAsync() => Page.Locator("#content[data-live=true]").WaitForAsync(new() { Timeout = 15_000, State = WaitForSelectorState.Attached });
+
     public void AssertNoComplaints() => Assert.Empty(complaints);
 
     public async ValueTask DisposeAsync() => await context.DisposeAsync();
