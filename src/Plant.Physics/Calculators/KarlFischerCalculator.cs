@@ -15,7 +15,7 @@ public sealed record TitrationRequest(double? SampleG, double? WaterUg, double? 
 /// <summary>Asks for the result of a titration with its replicates.</summary>
 /// <param name="Replicates">The titrations.</param>
 /// <param name="Method">Code of the method.</param>
-public sealed record KarlFischerRequest(IReadOnlyList<TitrationRequest>? Replicates, string? Method);
+public sealed record KarlFischerRequest(IReadOnlyList<TitrationRequest?>? Replicates, string? Method);
 
 /// <summary>Result of a titration with its replicates.</summary>
 /// <param name="WaterPpm">Mean [mg/kg].</param>
@@ -65,13 +65,19 @@ public static class KarlFischerCalculator
         working.Add("repeatability", FormattableString.Invariant($"{table.Coefficient:0.####}·{mean:0.###}^{table.Power}"), repeatability, "mg/kg", table.Source);
         working.Add("range", FormattableString.Invariant($"largest − smallest; accepted up to {critical:0.##} mg/kg for {contents.Count}"), range, "mg/kg", "ISO 5725-6 (studentised range)",
             within ? null : "the replicates differ by more than the method's repeatability: titrate again");
-        working.Add("standard uncertainty", FormattableString.Invariant($"r/2.7718/√{contents.Count}"), uncertainty, "mg/kg", table.Source);
+        working.Add("standard uncertainty", FormattableString.Invariant($"max(r/2.7718, {KarlFischer.SmallestPpm} mg/kg)/√{contents.Count}"), uncertainty, "mg/kg", table.Source);
         return new(new KarlFischerResponse(mean, contents, repeatability, within, uncertainty, working.Steps), []);
     }
 
-    private static double Content(TitrationRequest titration, int index, List<Refusal> refusals, Working working)
+    private static double Content(TitrationRequest? titration, int index, List<Refusal> refusals, Working working)
     {
         string Field(string name) => string.Create(CultureInfo.InvariantCulture, $"replicates[{index}].{name}");
+        if (titration is null)
+        {
+            refusals.Add(new Refusal(string.Create(CultureInfo.InvariantCulture, $"replicates[{index}]"), "", "is empty: give sampleG and waterUg or chargeC"));
+            return 0;
+        }
+
         var mass = refusals.Within(Field("sampleG"), titration.SampleG, 0, 10_000, "g", openLow: true);
         if (titration.WaterUg is null == titration.ChargeC is null)
         {

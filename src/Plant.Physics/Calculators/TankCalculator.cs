@@ -83,7 +83,7 @@ public static class TankCalculator
         var working = new Working();
         var depth = geometry.DepthM(volume);
         var area = geometry.SurfaceAreaM2(depth);
-        if (area <= 0)
+        if (geometry.Shape == TankShape.HorizontalCylinder && depth > 0.9999 * geometry.HeightM)
         {
             refusals.Add(new Refusal("oilVolumeL", request.OilVolumeL!.Value.ToString("R", CultureInfo.InvariantCulture), "fills the cylinder to the crown: it has no surface; give the volume that it runs with"));
             return new(null, refusals);

@@ -31,7 +31,7 @@ public static class DensityTemperature
     /// <param name="group">Product group.</param>
     /// <param name="density15KgM3">Density at 15 °C [kg/m³].</param>
     /// <returns>Expansion α [1/K].</returns>
-    /// <remarks>Equation: α = K0/ρ² + K1/ρ + K2. Source: ASTM D1250-80 (read).</remarks>
+    /// <remarks>Equation: α = K0/ρ² + K1/ρ + K2. Source: ASTM D1250-80 (read). Valid for: the densities of the group.</remarks>
     public static double ExpansionPerK(Group group, double density15KgM3)
     {
         Guard.Positive(density15KgM3);
@@ -54,7 +54,7 @@ public static class DensityTemperature
     /// <param name="densityKgM3">Density measured [kg/m³].</param>
     /// <param name="temperatureK">Temperature of the measurement [K].</param>
     /// <returns>Density at 15 °C [kg/m³].</returns>
-    /// <remarks>Equation: fixed point of ρ15 = ρ/VCF(ρ15). Source: ASTM D1250-80 (read).</remarks>
+    /// <remarks>Equation: fixed point of ρ15 = ρ/VCF(ρ15). Source: ASTM D1250-80 (read). Valid for: the densities of the group, about −20 to 150 °C.</remarks>
     public static double Density15KgM3(Group group, double densityKgM3, double temperatureK)
     {
         var density15 = Guard.Positive(densityKgM3);

@@ -223,13 +223,31 @@ public sealed class FluidModel
         return (v40.Value, sheet.Viscosity100Mm2S ?? Viscosity100Mm2S(v40.Value, defaults));
     }
 
-    /// <summary>Viscosity at 100 °C of an oil with the family's typical slope: the family's D341 line moved to its viscosity at 40 °C.</summary>
+    /// <summary>Viscosity at 100 °C of an oil with the family's typical viscosity index; where the index is not defined, with the family's slope.</summary>
     private static double Viscosity100Mm2S(double viscosity40Mm2S, FluidFamilyDefaults defaults)
     {
-        var slope = ViscosityTemperature.Through(313.15, defaults.Viscosity40Mm2S, 373.15, defaults.Viscosity100Mm2S);
-        var z40 = Math.Log10(Math.Log10(viscosity40Mm2S + 0.7));
-        var z100 = z40 - (slope.B * (Math.Log10(373.15) - Math.Log10(313.15)));
-        return Math.Max(0.3, Math.Pow(10, Math.Pow(10, z100)) - 0.7);
+        double low = 2, high = viscosity40Mm2S;
+        if (low >= high || ViscosityIndex.Of(viscosity40Mm2S, low) > defaults.ViscosityIndex)
+        {
+            var slope = ViscosityTemperature.Through(313.15, defaults.Viscosity40Mm2S, 373.15, defaults.Viscosity100Mm2S);
+            var z40 = Math.Log10(Math.Log10(viscosity40Mm2S + 0.7));
+            return Math.Max(0.3, Math.Pow(10, Math.Pow(10, z40 - (slope.B * (Math.Log10(373.15) - Math.Log10(313.15))))) - 0.7);
+        }
+
+        for (var i = 0; i < 50; i++)
+        {
+            var middle = 0.5 * (low + high);
+            if (ViscosityIndex.Of(viscosity40Mm2S, middle) < defaults.ViscosityIndex)
+            {
+                low = middle;
+            }
+            else
+            {
+                high = middle;
+            }
+        }
+
+        return 0.5 * (low + high);
     }
 
     private static void Above(List<Refusal> refusals, string field, double? value, double low, double high, string unit)

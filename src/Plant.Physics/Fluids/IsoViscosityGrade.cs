@@ -30,6 +30,7 @@ public static class IsoViscosityGrade
     /// <summary>Midpoint viscosity of a grade.</summary>
     /// <param name="grade">The grade [1].</param>
     /// <returns>Kinematic viscosity at 40 °C [mm²/s]; the grade's own number where the list does not hold it.</returns>
+    /// <remarks>Equation: the list. Source: ISO 3448 (from memory, unverified). Valid for: grades 2 to 3200.</remarks>
     public static double MidpointMm2S(double grade)
     {
         Guard.Positive(grade);

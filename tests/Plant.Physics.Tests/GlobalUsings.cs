@@ -1,0 +1,4 @@
+global using FsCheck;
+global using FsCheck.Fluent;
+global using FsCheck.Xunit;
+global using Xunit;
