@@ -1,1 +1,13 @@
-Console.WriteLine("skeleton");
+using Plant.Benchmarks;
+
+// dotnet run -c Release --project tests/Plant.Benchmarks -- all [--reference PATH-TO-A-PYTHON-PROGRAM]
+var reference = args is [.., "--reference", var path] ? path : null;
+return args.FirstOrDefault() switch
+{
+    "readings" => await WholeProcess.ReadingsAsync(reference),
+    "samples" => await WholeProcess.SamplesAsync(),
+    "assess" => await WholeProcess.AssessAsync(),
+    "working" => WorkingCost.Run(),
+    "all" => await WholeProcess.ReadingsAsync(reference) + await WholeProcess.SamplesAsync() + await WholeProcess.AssessAsync() + WorkingCost.Run(),
+    _ => WholeProcess.Usage(),
+};
