@@ -10,6 +10,7 @@ namespace Plant.Advice;
 internal static class Statement
 {
     private const double ActWithinDays = 30;
+    private const double WorthTelling = 0.05;
 
     public static Assessment Of(Evidence evidence, Working? working)
     {
@@ -143,6 +144,11 @@ internal static class Statement
             text.Add(string.Create(CultureInfo.InvariantCulture, $"Ingress rose to {Number(ingress.MedianGPerDay)} g/day about {changed:d MMM yyyy}, from {Number(earlier)}: look for a leak."));
         }
 
+        if (evidence.CapacityL is null && evidence.Settled is { MedianL: > WorthTelling })
+        {
+            text.Add("No drain date: its capacity for settled water is not known.");
+        }
+
         if (evidence.Plan.By is not null || dehydration is not null)
         {
             text.Add(Cautions.Advisory);
@@ -166,7 +172,7 @@ internal static class Statement
             }
         }
 
-        if (evidence.CapacityL is null && evidence.Settled is { MedianL: > 0.05 })
+        if (evidence.CapacityL is null && evidence.Settled is { MedianL: > WorthTelling })
         {
             actions.Add("Enter the tank's dimensions and suction height, or how much water may stand: without them no drain date can be told.");
         }

@@ -33,7 +33,7 @@ public static class LimitForecast
                 median = Math.Min(median, Math.Max(ceiling, now.WaterPpm));
             }
 
-            median = Math.Max(median, Math.Max(1, 0.2 * now.WaterPpm));
+            median = Math.Max(median, 0.2 * now.WaterPpm);
             var added = Math.Min(
                 (water.WanderPpm2PerDay * daysAhead) + Math.Pow(water.SlopeSdPpmPerDay * reach, 2),
                 Math.Pow(LocalLevel.WidestShare * median, 2));
@@ -60,10 +60,17 @@ public static class LimitForecast
     /// <returns>The date (UTC); null: not within a year.</returns>
     public static DateTime? PassedBy(OilWater water, double limitPpm, double? ceilingPpm, DateTime asOf)
     {
-        for (var day = 0; day <= HorizonDays; day++)
+        // by weeks, then by days within the week
+        for (var week = 0; week <= HorizonDays; week += 7)
         {
-            if (ChanceAbove(water, limitPpm, day, ceilingPpm) > Chance)
+            if (ChanceAbove(water, limitPpm, week, ceilingPpm) > Chance)
             {
+                var day = Math.Max(0, week - 6);
+                while (day < week && ChanceAbove(water, limitPpm, day, ceilingPpm) <= Chance)
+                {
+                    day++;
+                }
+
                 return asOf.AddDays(day);
             }
         }

@@ -38,7 +38,7 @@ public sealed record Ingress(double MedianGPerDay, double Low90GPerDay, double H
         var step = Math.Log(HighestPpmPerDay / LowestPpmPerDay) / (Cells - 1);
         var scale = massKg / 1000;
         var highest = double.NegativeInfinity;
-        var temper = Temper(intervals, start);
+        var trust = Trust(intervals, start);
         for (var cell = 0; cell < Cells; cell++)
         {
             var ppmPerDay = LowestPpmPerDay * Math.Exp(step * cell);
@@ -46,7 +46,7 @@ public sealed record Ingress(double MedianGPerDay, double Low90GPerDay, double H
             var log = -0.5 * z * z;
             for (var i = start; i < intervals.Count; i++)
             {
-                log += LogLikelihood(intervals[i], ppmPerDay * scale, temper * Age(intervals, i));
+                log += trust[i - start] * LogLikelihood(intervals[i], ppmPerDay * scale);
             }
 
             weight[cell] = log;
@@ -90,34 +90,41 @@ public sealed record Ingress(double MedianGPerDay, double Low90GPerDay, double H
         return new Ingress(Math.Sqrt(MedianGPerDay * surge.GPerDay), MedianGPerDay, Math.Max(High90GPerDay, surge.GPerDay * 2), surge.From, MedianGPerDay, Intervals);
     }
 
-    /// <summary>Old intervals say less of today: half a year halves their weight.</summary>
-    private static double Age(IReadOnlyList<BalanceInterval> intervals, int i) =>
-        Math.Pow(0.5, (intervals[^1].To - intervals[i].To).TotalDays / 180);
-
-    private static double Temper(IReadOnlyList<BalanceInterval> intervals, int start)
+    /// <summary>Old intervals say less of today: half a year halves their weight; and so many count in full at most.</summary>
+    private static double[] Trust(IReadOnlyList<BalanceInterval> intervals, int start)
     {
+        var trust = new double[intervals.Count - start];
         var sum = 0.0;
-        for (var i = start; i < intervals.Count; i++)
+        for (var i = 0; i < trust.Length; i++)
         {
-            sum += Age(intervals, i);
+            trust[i] = Math.Pow(0.5, (intervals[^1].To - intervals[start + i].To).TotalDays / 180);
+            sum += trust[i];
         }
 
-        return Math.Min(1, MostIntervals / sum);
+        for (var i = 0; i < trust.Length && sum > MostIntervals; i++)
+        {
+            trust[i] *= MostIntervals / sum;
+        }
+
+        return trust;
     }
 
-    private static double LogLikelihood(BalanceInterval interval, double rateGPerDay, double weight)
+    private static double LogLikelihood(BalanceInterval interval, double rateGPerDay)
     {
-        var scatter = interval.SettledLPerDay is null && rateGPerDay > interval.IngressGPerDay ? UnseenScatter : Scatter;
-        var sd = Math.Sqrt((interval.SdGPerDay * interval.SdGPerDay) + Math.Pow(scatter * rateGPerDay, 2));
-        var z = (interval.IngressGPerDay - rateGPerDay) / sd;
+        var own = interval.SdGPerDay * interval.SdGPerDay;
+        var scatter = Scatter * rateGPerDay;
+        var variance = own + (scatter * scatter);
+        var distance = interval.IngressGPerDay - rateGPerDay;
         if (interval.LowerBoundOnly)
         {
             // water may have settled unseen: only a rate below what the oil took up is unlikely
-            return z > 0 ? -0.5 * weight * Math.Min(z * z, 25) : 0;
+            return distance > 0 ? -0.5 * Math.Min(distance * distance / variance, 25) : 0;
         }
 
+        var unseen = UnseenScatter * rateGPerDay;
+        var square = distance * distance / (interval.SettledLPerDay is null && distance < 0 ? own + (unseen * unseen) : variance);
         // Student's t with 4 degrees of freedom: one odd interval does not decide
-        return weight * ((-2.5 * Math.Log(1 + (z * z / 4))) - Math.Log(sd));
+        return (-2.5 * Math.Log(1 + (square / 4))) - (0.5 * Math.Log(variance));
     }
 
     private static (int Start, DateTime? At, double? Earlier) LastChange(IReadOnlyList<BalanceInterval> intervals)
@@ -125,11 +132,17 @@ public sealed record Ingress(double MedianGPerDay, double Low90GPerDay, double H
         var best = 0.0;
         var at = 0;
         double before = 0, after = 0;
-        for (var cut = 3; cut <= intervals.Count - 2; cut++)
+        var rates = new (double Value, double Weight)[intervals.Count];
+        for (var i = 0; i < rates.Length; i++)
         {
-            var first = LogMean(intervals, 0, cut);
-            var second = LogMean(intervals, cut, intervals.Count);
-            var whole = LogMean(intervals, 0, intervals.Count);
+            rates[i] = LogRate(intervals[i]);
+        }
+
+        var whole = LogMean(rates);
+        for (var cut = 3; cut <= rates.Length - 2; cut++)
+        {
+            var first = LogMean(rates.AsSpan(0, cut));
+            var second = LogMean(rates.AsSpan(cut));
             var gain = 0.5 * (whole.Loss - first.Loss - second.Loss);
             if (gain > best && Math.Exp(Math.Abs(second.Mean - first.Mean)) > ChangeRatio)
             {
@@ -143,31 +156,30 @@ public sealed record Ingress(double MedianGPerDay, double Low90GPerDay, double H
     }
 
     /// <summary>Mean of the logarithms and the loss about it.</summary>
-    private static (double Mean, double Loss) LogMean(IReadOnlyList<BalanceInterval> intervals, int from, int to)
+    private static (double Mean, double Loss) LogMean(ReadOnlySpan<(double Value, double Weight)> rates)
     {
         double weights = 0, sum = 0;
-        for (var i = from; i < to; i++)
+        foreach (var (value, weight) in rates)
         {
-            var (value, sd) = LogRate(intervals[i]);
-            weights += 1 / (sd * sd);
-            sum += value / (sd * sd);
+            weights += weight;
+            sum += value * weight;
         }
 
         var mean = sum / weights;
         var loss = 0.0;
-        for (var i = from; i < to; i++)
+        foreach (var (value, weight) in rates)
         {
-            var (value, sd) = LogRate(intervals[i]);
-            loss += Math.Min(Math.Pow((value - mean) / sd, 2), 16);
+            loss += Math.Min((value - mean) * (value - mean) * weight, 16);
         }
 
         return (mean, loss);
     }
 
-    private static (double Value, double Sd) LogRate(BalanceInterval interval)
+    private static (double Value, double Weight) LogRate(BalanceInterval interval)
     {
         var floor = Math.Max(1, interval.SdGPerDay);
         var rate = Math.Max(interval.IngressGPerDay, 0) + floor;
-        return (Math.Log(rate), Math.Sqrt((Scatter * Scatter) + Math.Pow(interval.SdGPerDay / rate, 2)));
+        var own = interval.SdGPerDay / rate;
+        return (Math.Log(rate), 1 / ((Scatter * Scatter) + (own * own)));
     }
 }
