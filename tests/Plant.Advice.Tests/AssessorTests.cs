@@ -182,7 +182,12 @@ public class AssessorTests
         var history = Histories.Tank.Sampled(60, 61, 60);
         var late = Histories.Karl(3, 900) with { ReceivedAt = Histories.Now.AddDays(1) };
 
-        Assert.Equal(history.Assess().WaterPpm, (history with { Samples = [.. history.Samples, late] }).Assess().WaterPpm);
+        var crackle = Histories.Crackle(2, true) with { ReceivedAt = Histories.Now.AddDays(1) };
+        var said = (history with { Samples = [.. history.Samples, late, crackle] }).Assess();
+
+        Assert.Equal(history.Assess().WaterPpm, said.WaterPpm);
+        Assert.Equal(history.Assess().ProbabilityFreeNow, said.ProbabilityFreeNow);
+        Assert.Equal(history.Samples[^1].TakenAt, said.LastSampleAt);
     }
 
     [Fact]

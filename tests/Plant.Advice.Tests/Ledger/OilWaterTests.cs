@@ -1,3 +1,5 @@
+using Plant.Advice.Ledger;
+
 namespace Plant.Advice.Tests.Ledger;
 
 public class OilWaterTests
@@ -42,5 +44,20 @@ public class OilWaterTests
         var said = (Histories.Tank.Sampled(300, 305, 298, 302, 60) with { SeparatorRuns = [run] }).Assess();
 
         Assert.InRange(said.WaterPpm!.Value, 50, 75);
+    }
+
+    [Theory]
+    [InlineData(100.0)]
+    [InlineData(950.0)]
+    [InlineData(60.0)]
+    public void Estimate_AnyNewest_WeightsAddUpToOne(double newest)
+    {
+        var history = Histories.Tank.Sampled([.. Steady, newest]);
+        var observations = Observations.Of(history, null, Histories.Now);
+
+        var water = OilWater.Estimate(observations, Histories.Now, null, 260, 40)!;
+
+        Assert.True(water.Cases.Count > 1);
+        Assert.Equal(1, water.Cases.Sum(one => one.Weight), 12);
     }
 }
