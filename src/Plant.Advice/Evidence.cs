@@ -150,7 +150,9 @@ internal sealed record Evidence
         }
 
         // cold stands make water fall out of oil that is unsaturated while warm
-        var aboveCold = Oil.SaturationColdestPpm is { } cold ? water.ChanceAbove(cold, Oil.SaturationLogSd) : 0;
+        // and the drier it is while warm, the more of that it takes back
+        var keeps = Math.Min(1, Math.Pow(water.WaterPpm / (0.7 * saturation), 2));
+        var aboveCold = Oil.SaturationColdestPpm is { } cold ? keeps * water.ChanceAbove(cold, Oil.SaturationLogSd) : 0;
         var least = Priors.ColdStandShare * aboveCold;
         var now = Math.Max(least, water.ChanceAbove(0.9 * saturation, Oil.SaturationLogSd));
         var from = History.Drains.Count > 0 ? History.Drains[^1].At : DateTime.MinValue;

@@ -132,16 +132,24 @@ internal static class Statement
             {
                 Condition.FreeWater when evidence.Settled is { MedianL: > 0 } settled && (settled.MedianL > 0.05 || water.WaterPpm <= saturation) =>
                     $"About {Litres(settled.MedianL)} of water {(evidence.Oil.WaterGoes == WaterDirection.Up ? "float on" : "stand under")} the oil ({Litres(settled.Low90L)} to {Litres(settled.High90L)}); {Ppm(water.WaterPpm)} in it against {Ppm(saturation)} that it holds.",
+                Condition.FreeWater when water.WaterPpm <= saturation => $"{Ppm(water.WaterPpm)} in the oil against {Ppm(saturation)} that it holds while running; undissolved water is more likely than not.",
                 Condition.FreeWater => $"{Ppm(water.WaterPpm)} in the oil, more than the {Ppm(saturation)} that it holds while running.",
                 Condition.FreeWaterWhenCold => $"{Ppm(water.WaterPpm)} stay dissolved while it runs ({Ppm(saturation)}), but cold it holds only {Ppm(evidence.Oil.SaturationColdestPpm!.Value)}.",
                 Condition.NearSaturation => $"{Ppm(water.WaterPpm)} are close to the {Ppm(evidence.Oil.SaturationColdestPpm!.Value)} that the oil holds when cold.",
-                _ => $"{Ppm(water.WaterPpm)} are well below the {Ppm(evidence.Oil.SaturationColdestPpm!.Value)} that the oil holds when cold.",
+                _ => $"{Ppm(water.WaterPpm)} are below the {Ppm(evidence.Oil.SaturationColdestPpm!.Value)} that the oil holds when cold.",
             });
         }
 
         if (evidence.Ingress is { ChangedAt: { } changed, EarlierGPerDay: { } earlier } ingress)
         {
             text.Add(string.Create(CultureInfo.InvariantCulture, $"Ingress rose to {Number(ingress.MedianGPerDay)} g/day about {changed:d MMM yyyy}, from {Number(earlier)}: look for a leak."));
+        }
+
+        if (dehydration is not null && evidence is { DehydrateBy: { } passed, LimitPpm: { } limit } && water is not null)
+        {
+            text.Add(water.WaterPpm > limit ? $"Its limit of {Ppm(limit)} is passed."
+                : passed <= evidence.AsOf ? $"It may be above its limit of {Ppm(limit)} already."
+                : string.Create(CultureInfo.InvariantCulture, $"It may pass its limit of {Ppm(limit)} by {passed:d MMM yyyy}."));
         }
 
         if (evidence.CapacityL is null && evidence.Settled is { MedianL: > WorthTelling })

@@ -126,6 +126,16 @@ public class AssessorTests
     }
 
     [Fact]
+    public void Assess_WarmOilFarFromSaturationAndNeverDrained_NoFreeWaterWhileItRuns()
+    {
+        // a little above the 80 mg/kg that it holds when cold, far below the 238 that it holds while it runs: what fell out is taken up again
+        var said = Histories.Tank.Sampled(90, 92, 90, 91).Assess();
+
+        Assert.Equal(Condition.FreeWaterWhenCold, said.Condition);
+        Assert.True(said.ProbabilityFreeNow < 0.5);
+    }
+
+    [Fact]
     public void Assess_WaterStandsBeyondItsShare_DrainIsDueNow()
     {
         var history = Histories.Tank.Sampled(240, 241, 243, 240) with
@@ -154,6 +164,7 @@ public class AssessorTests
 
         Assert.Equal(Histories.Now, said.DehydrateBy);
         Assert.Equal(SeparatorKind.VacuumDehydrator, said.Dehydration);
+        Assert.Contains("limit of 100 ppm is passed", said.Reason, StringComparison.Ordinal);
         Assert.Contains("Advisory", said.Reason, StringComparison.Ordinal);
         Assert.NotEmpty(said.Cautions);
     }
