@@ -16,6 +16,8 @@ public sealed class PlantBrowser : IAsyncLifetime
     public async ValueTask InitializeAsync()
     {
         Assert.SkipUnless(File.Exists(Chromium), $"{Chromium} is missing: apt-get install chromium");
+        // a busy machine is slow, not wrong: budgets are measured apart
+        Assertions.SetDefaultExpectTimeout(30_000);
         server = await ServerProcess.StartAsync("Development");
         playwright = await Playwright.CreateAsync();
         browser = await playwright.Chromium.LaunchAsync(new()
