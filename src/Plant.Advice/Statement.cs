@@ -1,5 +1,6 @@
 using System.Globalization;
 using Plant.Advice.Dehydration;
+using Plant.Advice.Drains;
 using Plant.Advice.Ledger;
 using Plant.Physics;
 using Plant.Physics.Fluids;
@@ -120,29 +121,29 @@ internal static class Statement
         }
         else if (evidence.Oil.Fluid is { HasSaturation: false })
         {
-            text.Add($"Water-soluble polyalkylene glycol without a solubility curve: it has no saturation, so free water cannot be told; {Ppm(water.WaterPpm)} in it{Against(evidence)}.");
+            text.Add($"Water-soluble polyalkylene glycol without a solubility curve: it has no saturation, so free water cannot be told; {Estimate(water)} in it{Against(evidence)}.");
         }
         else if (evidence.Oil.SaturationPpm is not { } saturation)
         {
-            text.Add($"{Ppm(water.WaterPpm)} in the oil, but its running temperature is not known: enter it to compare with saturation.");
+            text.Add($"{Estimate(water)} in the oil, but its running temperature is not known: enter it to compare with saturation.");
         }
         else
         {
             text.Add(condition switch
             {
                 Condition.FreeWater when evidence.Settled is { MedianL: > 0 } settled && (settled.MedianL > 0.05 || water.WaterPpm <= saturation) =>
-                    $"About {Litres(settled.MedianL)} of water {(evidence.Oil.WaterGoes == WaterDirection.Up ? "float on" : "stand under")} the oil ({Litres(settled.Low90L)} to {Litres(settled.High90L)}); {Ppm(water.WaterPpm)} in it against {Ppm(saturation)} that it holds.",
-                Condition.FreeWater when water.WaterPpm <= saturation => $"{Ppm(water.WaterPpm)} in the oil against {Ppm(saturation)} that it holds while running; undissolved water is more likely than not.",
-                Condition.FreeWater => $"{Ppm(water.WaterPpm)} in the oil, more than the {Ppm(saturation)} that it holds while running.",
-                Condition.FreeWaterWhenCold => $"{Ppm(water.WaterPpm)} stay dissolved while it runs ({Ppm(saturation)}), but cold it holds only {Ppm(evidence.Oil.SaturationColdestPpm!.Value)}.",
-                Condition.NearSaturation => $"{Ppm(water.WaterPpm)} are close to the {Ppm(evidence.Oil.SaturationColdestPpm!.Value)} that the oil holds when cold.",
-                _ => $"{Ppm(water.WaterPpm)} are below the {Ppm(evidence.Oil.SaturationColdestPpm!.Value)} that the oil holds when cold.",
+                    $"About {Standing(settled, evidence.Oil.WaterGoes)}; {Estimate(water)} in it against {Ppm(saturation)} that it holds.",
+                Condition.FreeWater when water.WaterPpm <= saturation => $"{Estimate(water)} in the oil against {Ppm(saturation)} that it holds while running; undissolved water is more likely than not.",
+                Condition.FreeWater => $"{Estimate(water)} in the oil, more than the {Ppm(saturation)} that it holds while running.",
+                Condition.FreeWaterWhenCold => $"{Estimate(water)} stay dissolved while it runs ({Ppm(saturation)}), but cold it holds only {Ppm(evidence.Oil.SaturationColdestPpm!.Value)}.",
+                Condition.NearSaturation => $"{Estimate(water)} are close to the {Ppm(evidence.Oil.SaturationColdestPpm!.Value)} that the oil holds when cold.",
+                _ => $"{Estimate(water)} are below the {Ppm(evidence.Oil.SaturationColdestPpm!.Value)} that the oil holds when cold.",
             });
         }
 
         if (evidence.Ingress is { ChangedAt: { } changed, EarlierGPerDay: { } earlier } ingress)
         {
-            text.Add(string.Create(CultureInfo.InvariantCulture, $"Ingress rose to {Number(ingress.MedianGPerDay)} g/day about {changed:d MMM yyyy}, from {Number(earlier)}: look for a leak."));
+            text.Add(string.Create(CultureInfo.InvariantCulture, $"Ingress rose to {Significant.Of(ingress.MedianGPerDay, ingress.Low90GPerDay, ingress.High90GPerDay).Value} g/day about {changed:d MMM yyyy}, from {Significant.Of(earlier)}: look for a leak."));
         }
 
         if (dehydration is not null && evidence is { DehydrateBy: { } passed, LimitPpm: { } limit } && water is not null)
@@ -220,16 +221,15 @@ internal static class Statement
 
     private static string Against(Evidence evidence) => evidence.LimitPpm is { } limit ? $" against a limit of {Ppm(limit)}" : "";
 
-    private static string Ppm(double value) => $"{Number(value)} ppm";
-
-    private static string Litres(double value) => $"{Number(value)} L";
-
-    /// <summary>Two or three figures, as many as the estimate carries.</summary>
-    private static string Number(double value) => value switch
+    private static string Standing(SettledWater settled, WaterDirection? goes)
     {
-        < 0.095 => value.ToString("0.00", CultureInfo.InvariantCulture),
-        < 9.95 => value.ToString("0.0", CultureInfo.InvariantCulture),
-        < 995 => value.ToString("0", CultureInfo.InvariantCulture),
-        _ => (Math.Round(value / 10) * 10).ToString("#,0", CultureInfo.InvariantCulture),
-    };
+        var (value, low, high) = Significant.Of(settled.MedianL, settled.Low90L, settled.High90L);
+        return $"{value} L of water {(goes == WaterDirection.Up ? "float on" : "stand under")} the oil ({low} to {high} L)";
+    }
+
+    private static string Estimate(OilWater water) => $"{Significant.Of(water.WaterPpm, water.Low90Ppm, water.High90Ppm).Value} ppm";
+
+    private static string Ppm(double value) => $"{Significant.Of(value)} ppm";
+
+    private static string Litres(double value) => $"{Significant.Of(value)} L";
 }

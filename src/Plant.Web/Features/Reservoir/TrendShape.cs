@@ -17,7 +17,9 @@ internal static class TrendShape
         {
             var days = view.Forecast.Select(f => (object)now.AddDays(f.Day)).ToList();
             yield return new("90 %, lower", SeriesStyle.BandFloor, days, [.. view.Forecast.Select(f => f.WaterLow90Ppm)]);
-            yield return new("90 %, upper", SeriesStyle.Band, days, [.. view.Forecast.Select(f => f.WaterHigh90Ppm)]);
+            yield return new("90 %, upper", SeriesStyle.WideBand, days, [.. view.Forecast.Select(f => f.WaterHigh90Ppm)]);
+            yield return new("50 %, lower", SeriesStyle.BandFloor, days, [.. view.Forecast.Select(f => f.WaterLow50Ppm)]);
+            yield return new("50 %, upper", SeriesStyle.NarrowBand, days, [.. view.Forecast.Select(f => f.WaterHigh50Ppm)]);
         }
 
         if (view.Assessment.SaturationNowPpm is { } warm)
@@ -37,9 +39,10 @@ internal static class TrendShape
 
         if (view.Assessment.IngressChangedAt is { } changed)
         {
-            var top = view.Observations.Select(o => o.WaterPpm).DefaultIfEmpty(100).Max();
-            yield return new("ingress rose", SeriesStyle.Dashed, [changed, changed], [0, top]);
+            yield return ChartSeries.At($"ingress rose, {Figures.ShortDay(changed)}", changed);
         }
+
+        yield return ChartSeries.At($"as of {Figures.ShortDay(now)}", now, today: true);
 
         yield return Points("result", SeriesStyle.Rings, [.. view.Observations.Where(o => !o.Outlying)]);
         var odd = view.Observations.Where(o => o.Outlying).ToList();
