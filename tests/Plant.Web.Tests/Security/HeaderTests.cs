@@ -1,5 +1,6 @@
 using System.Net;
 using Plant.Register.Access;
+using Plant.Web.Features.Account;
 using Plant.Web.Tests.Support;
 
 namespace Plant.Web.Tests.Security;
@@ -62,5 +63,5 @@ public sealed class HeaderTests(WebPlant plant)
     [InlineData("/\\evil.example", "/")]
     [InlineData("https://evil.example", "/")]
     [InlineData(null, "/")]
-    public void ReturnAddress_StaysOnThisSite(string? given, string used) => Assert.Equal(used, Features.Account.AccountEndpoints.Local(given));
+    public void ReturnAddress_StaysOnThisSite(string? given, string used) => Assert.Equal(used, AccountEndpoints.Local(given));
 }

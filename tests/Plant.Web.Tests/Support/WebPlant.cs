@@ -15,6 +15,9 @@ public sealed partial class WebPlant : IAsyncLifetime
     private Factory? factory;
     private string folder = "";
 
+    /// <summary>Settings of this server beyond the usual ones.</summary>
+    public Dictionary<string, string> Settings { get; init; } = [];
+
     public IServiceProvider Services => factory!.Services;
 
     public Uri Address => factory!.ClientOptions.BaseAddress;
@@ -22,7 +25,7 @@ public sealed partial class WebPlant : IAsyncLifetime
     public async ValueTask InitializeAsync()
     {
         folder = Directory.CreateTempSubdirectory("plant-web-").FullName;
-        factory = new Factory(folder);
+        factory = new Factory(folder, Settings);
         factory.StartServer();
         foreach (var role in PlantRole.All)
         {
@@ -72,10 +75,11 @@ public sealed partial class WebPlant : IAsyncLifetime
     private sealed class Factory : WebApplicationFactory<Program>
     {
         private readonly string folder;
+        private readonly Dictionary<string, string> settings;
 
-        public Factory(string folder)
+        public Factory(string folder, Dictionary<string, string> settings)
         {
-            this.folder = folder;
+            (this.folder, this.settings) = (folder, settings);
             UseKestrel(0);
         }
 
@@ -83,6 +87,11 @@ public sealed partial class WebPlant : IAsyncLifetime
         {
             builder.UseEnvironment("Development");
             builder.UseSetting("Data:Folder", folder);
+            foreach (var (key, value) in settings)
+            {
+                builder.UseSetting(key, value);
+            }
+
             builder.UseSetting("Logging:LogLevel:Default", "Warning");
         }
     }

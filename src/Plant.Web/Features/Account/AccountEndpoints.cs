@@ -15,7 +15,7 @@ public static class AccountEndpoints
     {
         var account = routes.MapGroup("/account").ExcludeFromDescription();
         account.MapPost("/sign-in", SignInAsync).AllowAnonymous().RequireRateLimiting(AccountServices.SignInLimit);
-        account.MapPost("/demo", DemoAsync).AllowAnonymous().RequireRateLimiting(AccountServices.SignInLimit);
+        account.MapPost("/demo", DemoAsync).AllowAnonymous();
         account.MapPost("/first", FirstAsync).AllowAnonymous().RequireRateLimiting(AccountServices.SignInLimit);
         account.MapPost("/sign-out", SignOutAsync).AllowAnonymous();
         account.MapPost("/password", PasswordAsync).RequireRateLimiting(AccountServices.SignInLimit);

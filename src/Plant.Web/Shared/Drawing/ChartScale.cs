@@ -1,7 +1,7 @@
 namespace Plant.Web.Shared.Drawing;
 
 /// <summary>The scales of a chart, from its series.</summary>
-internal static class ChartScale
+public static class ChartScale
 {
     private const double Room = 1.08;
     private const double Margin = 0.015;

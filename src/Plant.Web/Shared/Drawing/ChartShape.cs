@@ -8,7 +8,7 @@ using AnnotationLib = Plotly.Blazor.LayoutLib.AnnotationLib;
 namespace Plant.Web.Shared.Drawing;
 
 /// <summary>Turns series into traces and a layout in the colours of the tokens.</summary>
-internal static class ChartShape
+public static class ChartShape
 {
     private const int Height = 350, TopRoom = 26, Foot = 44, LabelHeight = 16;
     private const string Clear = "rgba(0,0,0,0)";
