@@ -7,7 +7,8 @@ return args.FirstOrDefault() switch
     "readings" => await WholeProcess.ReadingsAsync(reference),
     "samples" => await WholeProcess.SamplesAsync(),
     "assess" => await WholeProcess.AssessAsync(),
+    "pages" => await PageTimes.RunAsync(),
     "working" => WorkingCost.Run(),
-    "all" => await WholeProcess.ReadingsAsync(reference) + await WholeProcess.SamplesAsync() + await WholeProcess.AssessAsync() + WorkingCost.Run(),
+    "all" => await WholeProcess.ReadingsAsync(reference) + await WholeProcess.SamplesAsync() + await WholeProcess.AssessAsync() + await PageTimes.RunAsync() + WorkingCost.Run(),
     _ => WholeProcess.Usage(),
 };

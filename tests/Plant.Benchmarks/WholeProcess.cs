@@ -11,7 +11,7 @@ public static class WholeProcess
     /// <summary>How to call it.</summary>
     public static int Usage()
     {
-        Console.Error.WriteLine("usage: all | readings [--reference PATH] | samples | assess | working");
+        Console.Error.WriteLine("usage: all | readings [--reference PATH] | samples | assess | pages | working");
         return 2;
     }
 
@@ -79,7 +79,8 @@ public static class WholeProcess
         return 0;
     }
 
-    private static void Plant(string folder, int reservoirs)
+    /// <summary>Fluids and reservoirs of a plant.</summary>
+    public static void Plant(string folder, int reservoirs)
     {
         File.WriteAllText(System.IO.Path.Combine(folder, "fluids.csv"), "code,name,family,viscosity40Mm2S,viscosity100Mm2S,density15KgM3,solubilityA,solubilityB,waterLimitPpm\nM,Oil,mineral,46,6.8,870,7.09,1567,300\n");
         using var writer = new StreamWriter(System.IO.Path.Combine(folder, "reservoirs.csv"));
@@ -90,7 +91,8 @@ public static class WholeProcess
         }
     }
 
-    private static void Samples(string folder, int reservoirs, int each)
+    /// <summary>Their samples.</summary>
+    public static void Samples(string folder, int reservoirs, int each)
     {
         var random = new Random(1);
         using var writer = new StreamWriter(System.IO.Path.Combine(folder, "samples.csv"));

@@ -1,4 +1,4 @@
-using Plant.Browser.Tests.Support;
+using Plant.Tests.Support;
 
 namespace Plant.Browser.Tests.Faults;
 

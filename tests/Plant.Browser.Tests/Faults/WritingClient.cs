@@ -3,7 +3,7 @@ using System.Net;
 using System.Net.Http.Headers;
 using System.Net.Http.Json;
 using System.Text.Json;
-using Plant.Browser.Tests.Support;
+using Plant.Tests.Support;
 
 namespace Plant.Browser.Tests.Faults;
 

@@ -1,4 +1,5 @@
 using Microsoft.Playwright;
+using Plant.Tests.Support;
 
 namespace Plant.Browser.Tests.Support;
 

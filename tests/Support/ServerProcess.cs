@@ -3,7 +3,7 @@ using System.Net;
 using System.Net.Sockets;
 using System.Text;
 
-namespace Plant.Browser.Tests.Support;
+namespace Plant.Tests.Support;
 
 /// <summary>The real program as its own process on a free loopback port with its own data folder.</summary>
 public sealed class ServerProcess : IAsyncDisposable
