@@ -21,3 +21,7 @@ export function watch(chart) {
     },
   };
 }
+export async function load(interop, script) {
+  const { importScript } = await import(interop);
+  await importScript('plotly-import', script);
+}
