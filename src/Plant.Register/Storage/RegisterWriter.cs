@@ -116,12 +116,13 @@ public sealed class RegisterWriter(IDbContextFactory<PlantDbContext> contexts, I
             await AppendAsync(context, chain, entry, now, actor, reason, cancellation);
         }
 
-        // the importer works without automatic detection; the new tokens must be seen all the same
-        context.ChangeTracker.DetectChanges();
         foreach (var batch in context.Batches)
         {
             chain.Append("imported", batch.Kind, null, batch.Key, batch.Detail, batch.CountDelta, batch.SumDelta);
         }
+
+        // the importer works without automatic detection; the new tokens and the heads of the chain must be seen all the same
+        context.ChangeTracker.DetectChanges();
 
         return null;
     }

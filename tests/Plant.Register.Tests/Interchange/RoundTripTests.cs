@@ -99,6 +99,23 @@ public sealed class RoundTripTests(Plants plants)
         Assert.Empty(await plant.Get<AuditVerifier>().VerifyAsync());
     }
 
+    [Theory, MemberData(nameof(Engines))]
+    public async Task SecondImport_OfNewRows_KeepsTheChainWhole(Engine engine)
+    {
+        await using var plant = await plants.EmptyAsync(engine);
+        await ImportAsync(plant, Foreign);
+        var folder = Directory.CreateDirectory(Path.Combine(plant.Folder, "more")).FullName;
+        await File.WriteAllTextAsync(Path.Combine(folder, "fluids.csv"), "code,name,family\nNEW-1,Oil,mineral\n");
+        await File.WriteAllTextAsync(Path.Combine(folder, "samples.csv"), "sample,tag,takenAt,point,method,waterPpm,replicate\nNEW-S1,P-101A,2026-06-01T08:00:00Z,return,kf-coulometric,100,1\n");
+        await File.WriteAllTextAsync(Path.Combine(folder, "readings.csv"), "tag,readAt,oilTemperatureC,waterActivity\nP-101A,2026-06-01T08:00:00Z,50,0.5\n");
+        var second = await ImportAsync(plant, folder);
+        Assert.Equal(3, second.Files.Sum(f => f.New));
+
+        var after = await plant.Get<Plant.Register.Reservoirs.FluidService>().CreateAsync(TestPlant.Planner, null, RegisterTests.Mineral("NEW-2"));
+        Assert.True(after.IsDone, after.Message);
+        Assert.Empty(await plant.Get<AuditVerifier>().VerifyAsync());
+    }
+
     [Fact]
     public async Task OneBadRow_WritesNothing()
     {
