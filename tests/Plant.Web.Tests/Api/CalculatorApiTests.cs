@@ -30,6 +30,10 @@ public sealed class CalculatorApiTests(WebPlant plant)
     [InlineData("karl-fischer", "{\"method\":\"kf-coulometric\",\"replicates\":[{\"sampleG\":1,\"waterUg\":200}]}", "repeatabilityPpm", 26.50, 1e-2)]
     // Cantley 1977: 2.297397 at 25 ppm
     [InlineData("bearing-life", "{\"waterPpm\":25}", "relativeLife", 2.297397, 1e-6)]
+    // Young–Laplace, 45 mN/m, 150°, 20 µm: 7794.2 Pa
+    [InlineData("screen", "{\"interfacialTensionMNM\":45,\"contactAngleDeg\":150,\"poreUm\":20}", "breakthroughKPa", 7.7942, 1e-4)]
+    // S·p/psat at 60 °C and 10 mbar with A 7.0895: 12.2057·10^−0.0005 = 12.1917 mg/kg
+    [InlineData("dry-down", "{\"fluid\":" + Oil + ",\"oilVolumeL\":5000,\"startPpm\":300,\"targetPpm\":50,\"kind\":\"vacuum-dehydrator\",\"flowLPerMin\":80,\"efficiency\":0.8,\"pressureKPa\":1,\"oilTemperatureC\":60,\"coldestTemperatureC\":20}", "floorPpm", 12.1917, 2e-3)]
     public async Task Calculator_GivesThePublishedValue(string name, string body, string field, double value, double tolerance)
     {
         var (status, answer) = await PostAsync(name, body);
@@ -60,6 +64,8 @@ public sealed class CalculatorApiTests(WebPlant plant)
     [InlineData("tank", "{\"fluid\":{\"family\":\"mineral\"},\"temperatureC\":40,\"shape\":\"rectangular\",\"lengthMm\":1000,\"widthMm\":1000,\"heightMm\":1000,\"oilVolumeL\":2000,\"circulationLPerMin\":10,\"dropletMedianUm\":100,\"geometricDeviation\":2}", "oilVolumeL")]
     [InlineData("karl-fischer", "{\"method\":\"guess\",\"replicates\":[{\"sampleG\":1,\"waterUg\":1}]}", "method")]
     [InlineData("bearing-life", "{\"waterPpm\":-4}", "waterPpm")]
+    [InlineData("screen", "{\"interfacialTensionMNM\":45,\"contactAngleDeg\":200,\"poreUm\":20}", "contactAngleDeg")]
+    [InlineData("dry-down", "{\"fluid\":{\"family\":\"mineral\"},\"oilVolumeL\":5000,\"startPpm\":300,\"targetPpm\":50,\"kind\":\"vacuum-dehydrator\",\"flowLPerMin\":80,\"efficiency\":80,\"pressureKPa\":1,\"oilTemperatureC\":60,\"coldestTemperatureC\":20}", "efficiency")]
     public async Task BadInput_NamesFieldValueAndRange(string name, string body, string field)
     {
         var (status, answer) = await PostAsync(name, body);
