@@ -176,29 +176,25 @@ public sealed class DryDownTests
         Assert.Equal(WaterForms.Dissolved, DryingMethods.Removes(DryingMethod.DesiccantBreather));
     }
 
-    // generous to a busy machine: the target is 20 µs, measured near 1 µs
+    // at most 20 µs a call (measured near 0.5 µs); the quickest of many batches, since the machine may be busy
     [Fact]
     public void Call_WithoutWorking_TakesMicroseconds()
     {
-        const int calls = 20_000;
+        const int calls = 500;
         var duty = Duty(DryingMethod.VacuumDehydrator, 1);
-        static double Once(DryDownDuty duty)
+        var quickest = TimeSpan.MaxValue;
+        for (var batch = 0; batch < 30; batch++)
         {
-            var drying = new DryDown(Oil, duty);
-            return drying.TimeToS(300, 50) ?? drying.AtPpm(300, 3600);
+            var start = TimeProvider.System.GetTimestamp();
+            for (var i = 0; i < calls; i++)
+            {
+                Assert.NotNull(new DryDown(Oil, duty).TimeToS(300, 50));
+            }
+
+            var took = TimeProvider.System.GetElapsedTime(start);
+            quickest = took < quickest ? took : quickest;
         }
 
-        Once(duty);
-        using var process = System.Diagnostics.Process.GetCurrentProcess();
-        var before = process.TotalProcessorTime;
-        var sum = 0.0;
-        for (var i = 0; i < calls; i++)
-        {
-            sum += Once(duty);
-        }
-
-        process.Refresh();
-        Assert.True(sum > 0);
-        Assert.InRange((process.TotalProcessorTime - before).TotalMicroseconds / calls, 0, 200);
+        Assert.InRange(quickest.TotalMicroseconds / calls, 0, 20);
     }
 }
