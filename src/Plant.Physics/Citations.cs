@@ -1,7 +1,7 @@
 namespace Plant.Physics;
 
 /// <summary>The published sources and the standing of what was taken from them; working steps cite these.</summary>
-public static class Citations
+public static partial class Citations
 {
     /// <summary>Kell 1975.</summary>
     public const string Kell = "Kell, J. Chem. Eng. Data 20 (1975) 97, density of water at 1 atm (coefficients from memory, within 0.016 kg/m³ of IAPWS)";

@@ -48,6 +48,15 @@ public sealed class FluidModel
     /// <summary>True where the density is the family's default.</summary>
     public bool DensityIsFamilyDefault { get; }
 
+    /// <summary>Relative permittivity [1].</summary>
+    public double RelativePermittivity => Sheet.RelativePermittivity ?? FluidFamilyDefaults.Of(Family).RelativePermittivity;
+
+    /// <summary>Interfacial tension against water [N/m].</summary>
+    public double InterfacialTensionNM => (Sheet.InterfacialTensionMNM ?? FluidFamilyDefaults.Of(Family).InterfacialTensionMNM) / 1000;
+
+    /// <summary>Electrical conductivity [S/m].</summary>
+    public double ConductivitySM => (Sheet.ConductivityPSM ?? FluidFamilyDefaults.Of(Family).ConductivityPSM) * 1e-12;
+
     /// <summary>Builds the model, or refuses what cannot be.</summary>
     /// <param name="sheet">What is known.</param>
     /// <param name="refusals">Receives a refusal for each value that cannot be.</param>

@@ -59,6 +59,10 @@ public static class ApiSetup
         calculators.MapCalculator<SettlingRequest, SettlingResponse>("settling", SettlingCalculator.Compute);
         calculators.MapCalculator<TankRequest, TankResponse>("tank", TankCalculator.Compute);
         calculators.MapCalculator<KarlFischerRequest, KarlFischerResponse>("karl-fischer", KarlFischerCalculator.Compute);
+        calculators.MapCalculator<CoalescerRequest, CoalescerResponse>("coalescer", CoalescerCalculator.Compute);
+        calculators.MapCalculator<ScreenRequest, ScreenResponse>("screen", ScreenCalculator.Compute);
+        calculators.MapCalculator<ElectricFieldRequest, ElectricFieldResponse>("electric-field", ElectricFieldCalculator.Compute);
+        calculators.MapCalculator<DryDownRequest, DryDownResponse>("dry-down", DryDownCalculator.Compute);
         calculators.MapCalculator<BearingLifeRequest, BearingLifeResponse>("bearing-life", BearingLifeCalculator.Compute);
     }
 

@@ -317,4 +317,17 @@ public sealed class FluidModelTests
 
     private static FluidModel Polyglycol(double density15, double expansion) =>
         Checks.Fluid(new FluidSheet { Family = FluidFamily.Pag, Density15KgM3 = density15, ExpansionPerK = expansion });
+
+    // ester polarises more than hydrocarbons (from memory: about 3 against 2.2); a sheet always wins
+    [Fact]
+    public void ElectricProperties_SheetOrFamily_AreInSiUnits()
+    {
+        var family = Checks.Fluid(new FluidSheet { Family = FluidFamily.Ester });
+        Assert.InRange(family.RelativePermittivity, 3, 3.6);
+        Assert.InRange(family.InterfacialTensionNM, 0.01, 0.05);
+        var given = Checks.Fluid(new FluidSheet { Family = FluidFamily.Ester, RelativePermittivity = 2.9, InterfacialTensionMNM = 17, ConductivityPSM = 250 });
+        Assert.Equal(2.9, given.RelativePermittivity);
+        Checks.Near(0.017, given.InterfacialTensionNM, 1e-12);
+        Checks.Near(2.5e-10, given.ConductivitySM, 1e-12);
+    }
 }

@@ -30,6 +30,14 @@ public sealed class CalculatorApiTests(WebPlant plant)
     [InlineData("karl-fischer", "{\"method\":\"kf-coulometric\",\"replicates\":[{\"sampleG\":1,\"waterUg\":200}]}", "repeatabilityPpm", 26.50, 1e-2)]
     // Cantley 1977: 2.297397 at 25 ppm
     [InlineData("bearing-life", "{\"waterPpm\":25}", "relativeLife", 2.297397, 1e-6)]
+    // Young–Laplace, 45 mN/m, 150°, 20 µm: 7794.2 Pa
+    [InlineData("screen", "{\"interfacialTensionMNM\":45,\"contactAngleDeg\":150,\"poreUm\":20}", "breakthroughKPa", 7.7942, 1e-4)]
+    // Davies (from memory) with 46 mm²/s and 854.223 kg/m³: 20.891 kPa at 0.0391 Pa·s, 20.995 kPa at 0.039294
+    [InlineData("coalescer", "{\"fluid\":" + Oil + ",\"temperatureC\":40,\"faceVelocityMmPerS\":5,\"fibreUm\":10,\"solidity\":0.1,\"thicknessMm\":5,\"dropletUm\":[3],\"stages\":1}", "pressureDropKPa", 20.995, 2e-3)]
+    // Taylor's limit in oil of εr 2.2 at 30 mN/m (defaults of the family), √(0.21025·γ/(ε·r)): 8.0474 kV/cm for 1 mm
+    [InlineData("electric-field", "{\"fluid\":" + Oil + ",\"temperatureC\":40,\"dropletUm\":1000,\"gapUm\":100,\"fieldKVPerCm\":3}", "criticalFieldKVPerCm", 8.0474, 1e-4)]
+    // S·p/psat at 60 °C and 10 mbar with A 7.0895: 12.2057·10^−0.0005 = 12.1917 mg/kg
+    [InlineData("dry-down", "{\"fluid\":" + Oil + ",\"oilVolumeL\":5000,\"startPpm\":300,\"targetPpm\":50,\"kind\":\"vacuum-dehydrator\",\"flowLPerMin\":80,\"efficiency\":0.8,\"pressureKPa\":1,\"oilTemperatureC\":60,\"coldestTemperatureC\":20}", "floorPpm", 12.1917, 2e-3)]
     public async Task Calculator_GivesThePublishedValue(string name, string body, string field, double value, double tolerance)
     {
         var (status, answer) = await PostAsync(name, body);
@@ -60,6 +68,10 @@ public sealed class CalculatorApiTests(WebPlant plant)
     [InlineData("tank", "{\"fluid\":{\"family\":\"mineral\"},\"temperatureC\":40,\"shape\":\"rectangular\",\"lengthMm\":1000,\"widthMm\":1000,\"heightMm\":1000,\"oilVolumeL\":2000,\"circulationLPerMin\":10,\"dropletMedianUm\":100,\"geometricDeviation\":2}", "oilVolumeL")]
     [InlineData("karl-fischer", "{\"method\":\"guess\",\"replicates\":[{\"sampleG\":1,\"waterUg\":1}]}", "method")]
     [InlineData("bearing-life", "{\"waterPpm\":-4}", "waterPpm")]
+    [InlineData("screen", "{\"interfacialTensionMNM\":45,\"contactAngleDeg\":200,\"poreUm\":20}", "contactAngleDeg")]
+    [InlineData("coalescer", "{\"fluid\":{\"family\":\"mineral\"},\"temperatureC\":40,\"faceVelocityMmPerS\":5,\"fibreUm\":10,\"solidity\":1.1,\"thicknessMm\":5,\"dropletUm\":[3],\"stages\":1}", "solidity")]
+    [InlineData("electric-field", "{\"fluid\":{\"family\":\"mineral\"},\"temperatureC\":40,\"dropletUm\":1000,\"gapUm\":0,\"fieldKVPerCm\":3}", "gapUm")]
+    [InlineData("dry-down", "{\"fluid\":{\"family\":\"mineral\"},\"oilVolumeL\":5000,\"startPpm\":300,\"targetPpm\":50,\"kind\":\"vacuum-dehydrator\",\"flowLPerMin\":80,\"efficiency\":80,\"pressureKPa\":1,\"oilTemperatureC\":60,\"coldestTemperatureC\":20}", "efficiency")]
     public async Task BadInput_NamesFieldValueAndRange(string name, string body, string field)
     {
         var (status, answer) = await PostAsync(name, body);
