@@ -9,13 +9,13 @@ namespace Plant.Physics.Tests;
 /// <summary>Every formula says what it computes, from where, for what, and in which units; the unit in the text is the unit in the name.</summary>
 public sealed partial class DocumentationTests
 {
-    private static readonly string[] FormulaFolders = ["Water", "Fluids", "Droplets", "Tanks", "Laboratory"];
+    private static readonly string[] FormulaFolders = ["Water", "Fluids", "Droplets", "Tanks", "Laboratory", "Coalescence"];
 
     // longest first: the suffix of a name and the unit that its text must give
     private static readonly (string Suffix, string Unit)[] Units =
     [
-        ("UgPerMin", "µg/min"), ("Mm2S", "mm²/s"), ("KgM3", "kg/m³"), ("M2S", "m²/s"), ("M3S", "m³/s"), ("PerK", "1/K"), ("PaS", "Pa·s"), ("Ppm", "mg/kg"),
-        ("MS", "m/s"), ("NM", "N/m"), ("M2", "m²"), ("M3", "m³"), ("Pa", "Pa"), ("Mm", "mm"), ("Ug", "µg"), ("minutes", "min"), ("K", "K"), ("M", "m"), ("S", "s"), ("C", "C"), ("G", "g"),
+        ("UgPerMin", "µg/min"), ("PerM2", "1/m²"), ("PerS", "1/s"), ("WKg", "W/kg"), ("Mm2S", "mm²/s"), ("KgM3", "kg/m³"), ("M2S", "m²/s"), ("M3S", "m³/s"), ("PerK", "1/K"), ("PaS", "Pa·s"), ("Ppm", "mg/kg"),
+        ("MS", "m/s"), ("NM", "N/m"), ("VM", "V/m"), ("M2", "m²"), ("M3", "m³"), ("Pa", "Pa"), ("Mm", "mm"), ("Ug", "µg"), ("inutes", "min"), ("K", "K"), ("M", "m"), ("S", "s"), ("J", "J"), ("N", "N"), ("C", "C"), ("G", "g"),
     ];
 
     private static readonly Dictionary<string, XElement> Texts = XDocument.Load(Path.ChangeExtension(typeof(WaterProperties).Assembly.Location, ".xml"))
