@@ -11,7 +11,7 @@ public static class WholeProcess
     /// <summary>How to call it.</summary>
     public static int Usage()
     {
-        Console.Error.WriteLine("usage: all | readings [--reference PATH] | samples | assess | working");
+        Console.Error.WriteLine("usage: all | readings [--reference PATH] | samples | assess | working | coalescence [--reference FOLDER]");
         return 2;
     }
 
