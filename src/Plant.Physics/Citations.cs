@@ -75,26 +75,11 @@ public static class Citations
     /// <summary>Smoluchowski.</summary>
     public const string Smoluchowski = "Smoluchowski 1916, 1917, collisions by diffusion and by laminar shear (from memory)";
 
-    /// <summary>Saffman and Turner.</summary>
-    public const string SaffmanTurner = "Saffman and Turner 1956, collisions below the Kolmogorov scale (from memory; an upper bound)";
-
     /// <summary>Differential settling.</summary>
     public const string DifferentialSettling = "collisions of drops that settle at different speeds, swept cylinder (from memory)";
 
     /// <summary>Population balance on cells.</summary>
     public const string KumarRamkrishna = "population balance on geometric cells after Kumar and Ramkrishna 1996 (from memory), six moments kept";
-
-    /// <summary>Coulaloglou and Tavlarides.</summary>
-    public const string CoulaloglouTavlarides = "Coulaloglou and Tavlarides 1977 (constants from memory: calibrate)";
-
-    /// <summary>Film drainage.</summary>
-    public const string Chesters = "Chesters 1991, drainage of the film between drops (from memory)";
-
-    /// <summary>Hinze.</summary>
-    public const string Hinze = "Hinze 1955, largest stable drop in turbulence (coefficient from memory)";
-
-    /// <summary>Viscous breakup.</summary>
-    public const string ViscousBreakup = "breakup below the Kolmogorov scale by viscous stress (form read; coefficient of order 1)";
 
     /// <summary>Dipoles in a field.</summary>
     public const string FieldAttraction = "attraction of two conducting drops in a field, far dipoles at contact (judgement: no published sizing law, calibrate)";
