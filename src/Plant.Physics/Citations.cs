@@ -68,4 +68,22 @@ public static partial class Citations
 
     /// <summary>Headspace equilibrium.</summary>
     public const string Headspace = "equal activity of water in oil and headspace";
+
+    /// <summary>Stokes.</summary>
+    public const string Stokes = "Stokes 1851, slow rigid sphere";
+
+    /// <summary>Smoluchowski.</summary>
+    public const string Smoluchowski = "Smoluchowski 1916, 1917, collisions by diffusion and by laminar shear (from memory)";
+
+    /// <summary>Differential settling.</summary>
+    public const string DifferentialSettling = "collisions of drops that settle at different speeds, swept cylinder (from memory)";
+
+    /// <summary>Population balance on cells.</summary>
+    public const string KumarRamkrishna = "population balance on geometric cells after Kumar and Ramkrishna 1996 (from memory), six moments kept";
+
+    /// <summary>Dipoles in a field.</summary>
+    public const string FieldAttraction = "attraction of two conducting drops in a field, far dipoles at contact (judgement: no published sizing law, calibrate)";
+
+    /// <summary>Judgement.</summary>
+    public const string Judgement = "judgement, no published value: calibrate";
 }

@@ -11,7 +11,7 @@ public static class WholeProcess
     /// <summary>How to call it.</summary>
     public static int Usage()
     {
-        Console.Error.WriteLine("usage: all | readings [--reference PATH] | samples | assess | pages | working");
+        Console.Error.WriteLine("usage: all | readings [--reference PATH] | samples | assess | pages | working | coalescence [--reference FOLDER]");
         return 2;
     }
 

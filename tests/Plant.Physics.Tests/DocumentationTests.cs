@@ -9,14 +9,14 @@ namespace Plant.Physics.Tests;
 /// <summary>Every formula says what it computes, from where, for what, and in which units; the unit in the text is the unit in the name.</summary>
 public sealed partial class DocumentationTests
 {
-    private static readonly string[] FormulaFolders = ["Water", "Fluids", "Droplets", "Tanks", "Laboratory", "Separators", "Ingress"];
+    private static readonly string[] FormulaFolders = ["Water", "Fluids", "Droplets", "Tanks", "Laboratory", "Separators", "Ingress", "Coalescence"];
 
     // longest first: the suffix of a name and the unit that its text must give
     private static readonly (string Suffix, string Unit)[] Units =
     [
-        ("PpmS", "mg/kg/s"), ("WM2K", "W/m²/K"), ("JKgK", "J/kg/K"), ("JKg", "J/kg"), ("KgS", "kg/s"), ("RadS", "rad/s"), ("Rad", "rad"), ("SM", "S/m"), ("VM", "V/m"), ("FM", "F/m"), ("Hz", "Hz"),
+        ("PpmS", "mg/kg/s"), ("WKg", "W/kg"), ("PerM2", "1/m²"), ("PerS", "1/s"), ("WM2K", "W/m²/K"), ("JKgK", "J/kg/K"), ("JKg", "J/kg"), ("KgS", "kg/s"), ("RadS", "rad/s"), ("Rad", "rad"), ("SM", "S/m"), ("VM", "V/m"), ("FM", "F/m"), ("Hz", "Hz"),
         ("UgPerMin", "µg/min"), ("Mm2S", "mm²/s"), ("KgM3", "kg/m³"), ("M2S", "m²/s"), ("M3S", "m³/s"), ("PerK", "1/K"), ("PaS", "Pa·s"), ("Ppm", "mg/kg"),
-        ("MS", "m/s"), ("NM", "N/m"), ("M2", "m²"), ("M3", "m³"), ("Pa", "Pa"), ("Mm", "mm"), ("Ug", "µg"), ("minutes", "min"), ("K", "K"), ("M", "m"), ("S", "s"), ("C", "C"), ("G", "g"),
+        ("MS", "m/s"), ("NM", "N/m"), ("M2", "m²"), ("M3", "m³"), ("Pa", "Pa"), ("Mm", "mm"), ("Ug", "µg"), ("inutes", "min"), ("K", "K"), ("M", "m"), ("S", "s"), ("C", "C"), ("G", "g"),
         ("Kg", "kg"), ("W", "W"), ("J", "J"), ("N", "N"),
     ];
 

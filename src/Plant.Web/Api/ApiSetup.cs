@@ -58,6 +58,7 @@ public static class ApiSetup
         calculators.MapCalculator<WaterSplitRequest, WaterSplitResponse>("water-split", WaterSplitCalculator.Compute);
         calculators.MapCalculator<SettlingRequest, SettlingResponse>("settling", SettlingCalculator.Compute);
         calculators.MapCalculator<TankRequest, TankResponse>("tank", TankCalculator.Compute);
+        calculators.MapCalculator<CoalescenceRequest, CoalescenceResponse>("coalescence", CoalescenceCalculator.Compute);
         calculators.MapCalculator<KarlFischerRequest, KarlFischerResponse>("karl-fischer", KarlFischerCalculator.Compute);
         calculators.MapCalculator<CoalescerRequest, CoalescerResponse>("coalescer", CoalescerCalculator.Compute);
         calculators.MapCalculator<ScreenRequest, ScreenResponse>("screen", ScreenCalculator.Compute);

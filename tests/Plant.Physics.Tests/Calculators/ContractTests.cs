@@ -16,6 +16,8 @@ public sealed class ContractTests
     [InlineData(typeof(SettlingRow), "dropletUm,velocityMmPerS,reynolds,settlingTimeS")]
     [InlineData(typeof(TankRequest), "fluid,temperatureC,shape,lengthMm,widthMm,heightMm,oilVolumeL,circulationLPerMin,tanksInSeries,dropletMedianUm,geometricDeviation")]
     [InlineData(typeof(TankResponse), "oilDepthMm,surfaceAreaM2,residenceTimeMin,cutSizeUm,removalFraction,working")]
+    [InlineData(typeof(CoalescenceRequest), "fluid,temperatureC,waterVolumeFraction,dropletMedianUm,geometricDeviation,depthMm,hours,shearRatePerS,collisionEfficiency,fieldKVPerCm,cells")]
+    [InlineData(typeof(CoalescenceResponse), "timesS,suspendedFraction,numberPerM3,medianUm,massErrorFraction,working")]
     [InlineData(typeof(KarlFischerRequest), "replicates,method")]
     [InlineData(typeof(TitrationRequest), "sampleG,waterUg,chargeC,driftUgPerMin,minutes,blankUg")]
     [InlineData(typeof(KarlFischerResponse), "waterPpm,replicatePpm,repeatabilityPpm,withinRepeatability,standardUncertaintyPpm,working")]

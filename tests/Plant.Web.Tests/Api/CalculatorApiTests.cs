@@ -12,6 +12,8 @@ public sealed class CalculatorApiTests(WebPlant plant)
 {
     private const string Oil = "{\"family\":\"mineral\",\"viscosity40Mm2S\":46,\"viscosity100Mm2S\":6.8,\"density15KgM3\":870,\"solubilityA\":7.0895,\"solubilityB\":1567}";
 
+    private const string Coalescence = "{\"fluid\":" + Oil + ",\"temperatureC\":50,\"waterVolumeFraction\":0.0005,\"dropletMedianUm\":10,\"geometricDeviation\":1.8,\"depthMm\":500,\"hours\":24,\"shearRatePerS\":5,\"collisionEfficiency\":0.1,\"fieldKVPerCm\":0";
+
     [Theory]
     // ASTM D341 through 46/6.8, computed independently: 20.6227 mm²/s at 60 °C
     [InlineData("fluid-state", "{\"fluid\":" + Oil + ",\"temperatureC\":60}", "kinematicViscosityMm2S", 20.6227, 1e-4)]
@@ -38,6 +40,8 @@ public sealed class CalculatorApiTests(WebPlant plant)
     [InlineData("electric-field", "{\"fluid\":" + Oil + ",\"temperatureC\":40,\"dropletUm\":1000,\"gapUm\":100,\"fieldKVPerCm\":3}", "criticalFieldKVPerCm", 8.0474, 1e-4)]
     // S·p/psat at 60 °C and 10 mbar with A 7.0895: 12.2057·10^−0.0005 = 12.1917 mg/kg
     [InlineData("dry-down", "{\"fluid\":" + Oil + ",\"oilVolumeL\":5000,\"startPpm\":300,\"targetPpm\":50,\"kind\":\"vacuum-dehydrator\",\"flowLPerMin\":80,\"efficiency\":0.8,\"pressureKPa\":1,\"oilTemperatureC\":60,\"coldestTemperatureC\":20}", "floorPpm", 12.1917, 2e-3)]
+    // no drop is lost by the computation
+    [InlineData("coalescence", Coalescence + ",\"cells\":40}", "massErrorFraction", 0, 1e-12)]
     public async Task Calculator_GivesThePublishedValue(string name, string body, string field, double value, double tolerance)
     {
         var (status, answer) = await PostAsync(name, body);
@@ -56,6 +60,21 @@ public sealed class CalculatorApiTests(WebPlant plant)
         Assert.InRange(answer["removalFraction"]!.GetValue<double>(), 0.05, 0.95);
     }
 
+    // start: 500 ppm of lognormal drops, median 10 µm by volume, deviation 1.8: 4.5185e12 per m³
+    [Fact]
+    public async Task Coalescence_StartsAsGivenAndLosesDrops()
+    {
+        var (_, answer) = await PostAsync("coalescence", Coalescence + "}");
+        var (suspended, number, median) = (Numbers("suspendedFraction"), Numbers("numberPerM3"), Numbers("medianUm"));
+        Assert.Equal(86_400, Numbers("timesS")[^1]);
+        Assert.Equal(1, suspended[0], 1e-12);
+        Assert.Equal(10, median[0], 0.01);
+        Assert.Equal(4.5185e12, number[0], 1e9);
+        Assert.True(number[^1] < 0.1 * number[0] && suspended[^1] < 0.1);
+
+        List<double> Numbers(string field) => [.. answer[field]!.AsArray().Select(value => value!.GetValue<double>())];
+    }
+
     [Theory]
     [InlineData("fluid-state", "{\"temperatureC\":40}", "fluid")]
     [InlineData("fluid-state", "{\"fluid\":{\"family\":\"wax\"},\"temperatureC\":40}", "fluid.family")]
@@ -67,6 +86,7 @@ public sealed class CalculatorApiTests(WebPlant plant)
     [InlineData("settling", "{\"fluid\":{\"family\":\"mineral\"},\"temperatureC\":40,\"dropletUm\":[-5],\"depthMm\":100}", "dropletUm[0]")]
     [InlineData("tank", "{\"fluid\":{\"family\":\"mineral\"},\"temperatureC\":40,\"shape\":\"rectangular\",\"lengthMm\":1000,\"widthMm\":1000,\"heightMm\":1000,\"oilVolumeL\":2000,\"circulationLPerMin\":10,\"dropletMedianUm\":100,\"geometricDeviation\":2}", "oilVolumeL")]
     [InlineData("karl-fischer", "{\"method\":\"guess\",\"replicates\":[{\"sampleG\":1,\"waterUg\":1}]}", "method")]
+    [InlineData("coalescence", Coalescence + ",\"cells\":5000}", "cells")]
     [InlineData("bearing-life", "{\"waterPpm\":-4}", "waterPpm")]
     [InlineData("screen", "{\"interfacialTensionMNM\":45,\"contactAngleDeg\":200,\"poreUm\":20}", "contactAngleDeg")]
     [InlineData("coalescer", "{\"fluid\":{\"family\":\"mineral\"},\"temperatureC\":40,\"faceVelocityMmPerS\":5,\"fibreUm\":10,\"solidity\":1.1,\"thicknessMm\":5,\"dropletUm\":[3],\"stages\":1}", "solidity")]
