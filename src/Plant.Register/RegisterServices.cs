@@ -3,6 +3,7 @@ using Plant.Register.Access;
 using Plant.Register.Assessments;
 using Plant.Register.Audit;
 using Plant.Register.Interchange;
+using Plant.Register.Laboratory;
 using Plant.Register.Reservoirs;
 using Plant.Register.Samples;
 using Plant.Register.Separators;
@@ -25,7 +26,12 @@ public static class RegisterServices
         .AddSingleton<SeparatorRunService>()
         .AddSingleton<ReadingService>()
         .AddSingleton<WorkOrderService>()
+        .AddSingleton<WorkOrderSteps>()
+        .AddSingleton<WorkOrderDrafter>()
+        .AddSingleton<Verification>()
         .AddSingleton<RoundService>()
+        .AddSingleton<BottleService>()
+        .AddSingleton<BenchService>()
         .AddSingleton<TokenService>()
         .AddSingleton<HistoryReader>()
         .AddSingleton<AssessmentService>()

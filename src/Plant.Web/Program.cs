@@ -1,9 +1,13 @@
 using Plant.Web.Api;
 using Plant.Web.Commands;
 using Plant.Web.Features.Account;
+using Plant.Web.Features.Bench;
 using Plant.Web.Features.Fleet;
+using Plant.Web.Features.Orders;
+using Plant.Web.Features.Records;
 using Plant.Web.Features.Register;
 using Plant.Web.Features.Reservoir;
+using Plant.Web.Features.Tag;
 using Plant.Web.Hosting;
 using Plant.Web.Shared;
 
@@ -27,6 +31,8 @@ builder.Services.AddLook();
 builder.Services.AddFleet();
 builder.Services.AddReservoirPages();
 builder.Services.AddRegisterPages();
+builder.Services.AddOrders();
+builder.Services.AddRecords();
 
 var app = builder.Build();
 app.UseHosting();
@@ -35,6 +41,10 @@ app.MapApi();
 app.MapAccount();
 app.MapFleet();
 app.MapRegister();
+app.MapOrders();
+app.MapBench();
+app.MapTag();
+app.MapRecords();
 app.MapRazorComponents<App>().AddInteractiveServerRenderMode();
 await app.PrepareAsync();
 await app.RunAsync();

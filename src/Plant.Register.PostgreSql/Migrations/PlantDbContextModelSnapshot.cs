@@ -390,6 +390,168 @@ namespace Plant.Register.PostgreSql.Migrations
                     b.ToTable("revisions", (string)null);
                 });
 
+            modelBuilder.Entity("Plant.Register.Laboratory.BenchBatch", b =>
+                {
+                    b.Property<Guid>("Id")
+                        .HasColumnType("uuid");
+
+                    b.Property<double?>("BlankUg")
+                        .HasColumnType("double precision");
+
+                    b.Property<DateTime?>("ClosedAt")
+                        .HasColumnType("timestamp with time zone");
+
+                    b.Property<double?>("DriftUgPerMin")
+                        .HasColumnType("double precision");
+
+                    b.Property<bool>("Duplicates")
+                        .HasColumnType("boolean");
+
+                    b.Property<string>("Entry")
+                        .IsRequired()
+                        .HasMaxLength(40)
+                        .HasColumnType("character varying(40)");
+
+                    b.Property<string>("Instrument")
+                        .IsRequired()
+                        .HasColumnType("text");
+
+                    b.Property<string>("Method")
+                        .IsRequired()
+                        .HasMaxLength(40)
+                        .HasColumnType("character varying(40)");
+
+                    b.Property<double?>("Minutes")
+                        .HasColumnType("double precision");
+
+                    b.Property<DateTime>("OpenedAt")
+                        .HasColumnType("timestamp with time zone");
+
+                    b.Property<string>("Owner")
+                        .IsRequired()
+                        .HasColumnType("text");
+
+                    b.Property<double?>("StandardFoundPpm")
+                        .HasColumnType("double precision");
+
+                    b.Property<double?>("StandardPpm")
+                        .HasColumnType("double precision");
+
+                    b.HasKey("Id");
+
+                    b.HasIndex("Owner", "OpenedAt");
+
+                    b.ToTable("bench_batches", (string)null);
+                });
+
+            modelBuilder.Entity("Plant.Register.Laboratory.BenchRow", b =>
+                {
+                    b.Property<Guid>("Id")
+                        .HasColumnType("uuid");
+
+                    b.Property<Guid>("BatchId")
+                        .HasColumnType("uuid");
+
+                    b.Property<string>("Bottle")
+                        .IsRequired()
+                        .HasColumnType("text");
+
+                    b.PrimitiveCollection<List<string>>("Cells")
+                        .IsRequired()
+                        .HasColumnType("text[]");
+
+                    b.Property<double?>("ExpectedHighPpm")
+                        .HasColumnType("double precision");
+
+                    b.Property<double?>("ExpectedLowPpm")
+                        .HasColumnType("double precision");
+
+                    b.Property<double?>("OilTemperatureC")
+                        .HasColumnType("double precision");
+
+                    b.Property<int>("Ordinal")
+                        .HasColumnType("integer");
+
+                    b.Property<string>("Point")
+                        .IsRequired()
+                        .HasMaxLength(40)
+                        .HasColumnType("character varying(40)");
+
+                    b.Property<DateTime?>("ReleasedAt")
+                        .HasColumnType("timestamp with time zone");
+
+                    b.Property<Guid>("ReservoirId")
+                        .HasColumnType("uuid");
+
+                    b.Property<double?>("SaturationPpm")
+                        .HasColumnType("double precision");
+
+                    b.Property<DateTime>("SavedAt")
+                        .HasColumnType("timestamp with time zone");
+
+                    b.Property<bool>("SetAside")
+                        .HasColumnType("boolean");
+
+                    b.Property<string>("Tag")
+                        .IsRequired()
+                        .HasColumnType("text");
+
+                    b.Property<DateTime>("TakenAt")
+                        .HasColumnType("timestamp with time zone");
+
+                    b.HasKey("Id");
+
+                    b.HasIndex("BatchId");
+
+                    b.HasIndex("Bottle");
+
+                    b.ToTable("bench_rows", (string)null);
+                });
+
+            modelBuilder.Entity("Plant.Register.Laboratory.Bottle", b =>
+                {
+                    b.Property<Guid>("Id")
+                        .HasColumnType("uuid");
+
+                    b.Property<string>("Code")
+                        .IsRequired()
+                        .HasColumnType("text");
+
+                    b.Property<double?>("OilTemperatureC")
+                        .HasColumnType("double precision");
+
+                    b.Property<string>("Point")
+                        .IsRequired()
+                        .HasMaxLength(40)
+                        .HasColumnType("character varying(40)");
+
+                    b.Property<Guid>("ReservoirId")
+                        .HasColumnType("uuid");
+
+                    b.Property<DateTime>("TakenAt")
+                        .HasColumnType("timestamp with time zone");
+
+                    b.Property<string>("TakenBy")
+                        .IsRequired()
+                        .HasColumnType("text");
+
+                    b.Property<Guid>("Token")
+                        .IsConcurrencyToken()
+                        .HasColumnType("uuid");
+
+                    b.Property<DateTime?>("WithdrawnAt")
+                        .HasColumnType("timestamp with time zone");
+
+                    b.HasKey("Id");
+
+                    b.HasIndex("Code")
+                        .IsUnique();
+
+                    b.HasIndex("ReservoirId");
+
+                    b.ToTable("bottles", (string)null);
+                });
+
             modelBuilder.Entity("Plant.Register.Reservoirs.Area", b =>
                 {
                     b.Property<Guid>("Id")
@@ -901,6 +1063,22 @@ namespace Plant.Register.PostgreSql.Migrations
                     b.ToTable("rounds", (string)null);
                 });
 
+            modelBuilder.Entity("Plant.Register.WorkOrders.OrderLook", b =>
+                {
+                    b.Property<Guid>("OrderId")
+                        .HasColumnType("uuid");
+
+                    b.Property<string>("Person")
+                        .HasColumnType("text");
+
+                    b.Property<DateTime>("At")
+                        .HasColumnType("timestamp with time zone");
+
+                    b.HasKey("OrderId", "Person");
+
+                    b.ToTable("order_looks", (string)null);
+                });
+
             modelBuilder.Entity("Plant.Register.WorkOrders.WorkOrder", b =>
                 {
                     b.Property<Guid>("Id")
@@ -913,13 +1091,49 @@ namespace Plant.Register.PostgreSql.Migrations
                     b.Property<DateTime>("CreatedAt")
                         .HasColumnType("timestamp with time zone");
 
+                    b.Property<DateTime?>("DecidedAt")
+                        .HasColumnType("timestamp with time zone");
+
+                    b.Property<string>("DecidedBy")
+                        .HasColumnType("text");
+
+                    b.Property<DateTime?>("DoneAt")
+                        .HasColumnType("timestamp with time zone");
+
+                    b.Property<string>("DoneBy")
+                        .HasColumnType("text");
+
+                    b.Property<double?>("DrainedOilL")
+                        .HasColumnType("double precision");
+
+                    b.Property<double?>("DrainedWaterL")
+                        .HasColumnType("double precision");
+
                     b.Property<DateTime?>("DueAt")
                         .HasColumnType("timestamp with time zone");
+
+                    b.Property<string>("Evidence")
+                        .HasColumnType("text");
+
+                    b.Property<double?>("ExpectedHighPpm")
+                        .HasColumnType("double precision");
+
+                    b.Property<double?>("ExpectedLowPpm")
+                        .HasColumnType("double precision");
+
+                    b.Property<string>("Findings")
+                        .HasColumnType("text");
+
+                    b.Property<double?>("FoundPpm")
+                        .HasColumnType("double precision");
 
                     b.Property<string>("Kind")
                         .IsRequired()
                         .HasMaxLength(40)
                         .HasColumnType("character varying(40)");
+
+                    b.Property<string>("Note")
+                        .HasColumnType("text");
 
                     b.Property<string>("Number")
                         .IsRequired()
@@ -932,10 +1146,19 @@ namespace Plant.Register.PostgreSql.Migrations
                     b.Property<Guid>("ReservoirId")
                         .HasColumnType("uuid");
 
+                    b.Property<double?>("RunHours")
+                        .HasColumnType("double precision");
+
+                    b.Property<string>("Separator")
+                        .HasColumnType("text");
+
                     b.Property<string>("State")
                         .IsRequired()
                         .HasMaxLength(40)
                         .HasColumnType("character varying(40)");
+
+                    b.Property<DateTime?>("SubmittedAt")
+                        .HasColumnType("timestamp with time zone");
 
                     b.Property<string>("Task")
                         .IsRequired()
@@ -944,6 +1167,9 @@ namespace Plant.Register.PostgreSql.Migrations
                     b.Property<Guid>("Token")
                         .IsConcurrencyToken()
                         .HasColumnType("uuid");
+
+                    b.Property<string>("VerifiedBySample")
+                        .HasColumnType("text");
 
                     b.Property<DateTime?>("WithdrawnAt")
                         .HasColumnType("timestamp with time zone");
@@ -1060,6 +1286,26 @@ namespace Plant.Register.PostgreSql.Migrations
                         .IsRequired();
                 });
 
+            modelBuilder.Entity("Plant.Register.Laboratory.BenchRow", b =>
+                {
+                    b.HasOne("Plant.Register.Laboratory.BenchBatch", null)
+                        .WithMany("Rows")
+                        .HasForeignKey("BatchId")
+                        .OnDelete(DeleteBehavior.Cascade)
+                        .IsRequired();
+                });
+
+            modelBuilder.Entity("Plant.Register.Laboratory.Bottle", b =>
+                {
+                    b.HasOne("Plant.Register.Reservoirs.Reservoir", "Reservoir")
+                        .WithMany()
+                        .HasForeignKey("ReservoirId")
+                        .OnDelete(DeleteBehavior.Restrict)
+                        .IsRequired();
+
+                    b.Navigation("Reservoir");
+                });
+
             modelBuilder.Entity("Plant.Register.Reservoirs.Area", b =>
                 {
                     b.HasOne("Plant.Register.Reservoirs.Site", null)
@@ -1158,6 +1404,11 @@ namespace Plant.Register.PostgreSql.Migrations
                         .IsRequired();
 
                     b.Navigation("Reservoir");
+                });
+
+            modelBuilder.Entity("Plant.Register.Laboratory.BenchBatch", b =>
+                {
+                    b.Navigation("Rows");
                 });
 #pragma warning restore 612, 618
         }

@@ -380,6 +380,168 @@ namespace Plant.Register.Sqlite.Migrations
                     b.ToTable("revisions", (string)null);
                 });
 
+            modelBuilder.Entity("Plant.Register.Laboratory.BenchBatch", b =>
+                {
+                    b.Property<Guid>("Id")
+                        .HasColumnType("TEXT");
+
+                    b.Property<double?>("BlankUg")
+                        .HasColumnType("REAL");
+
+                    b.Property<long?>("ClosedAt")
+                        .HasColumnType("INTEGER");
+
+                    b.Property<double?>("DriftUgPerMin")
+                        .HasColumnType("REAL");
+
+                    b.Property<bool>("Duplicates")
+                        .HasColumnType("INTEGER");
+
+                    b.Property<string>("Entry")
+                        .IsRequired()
+                        .HasMaxLength(40)
+                        .HasColumnType("TEXT");
+
+                    b.Property<string>("Instrument")
+                        .IsRequired()
+                        .HasColumnType("TEXT");
+
+                    b.Property<string>("Method")
+                        .IsRequired()
+                        .HasMaxLength(40)
+                        .HasColumnType("TEXT");
+
+                    b.Property<double?>("Minutes")
+                        .HasColumnType("REAL");
+
+                    b.Property<long>("OpenedAt")
+                        .HasColumnType("INTEGER");
+
+                    b.Property<string>("Owner")
+                        .IsRequired()
+                        .HasColumnType("TEXT");
+
+                    b.Property<double?>("StandardFoundPpm")
+                        .HasColumnType("REAL");
+
+                    b.Property<double?>("StandardPpm")
+                        .HasColumnType("REAL");
+
+                    b.HasKey("Id");
+
+                    b.HasIndex("Owner", "OpenedAt");
+
+                    b.ToTable("bench_batches", (string)null);
+                });
+
+            modelBuilder.Entity("Plant.Register.Laboratory.BenchRow", b =>
+                {
+                    b.Property<Guid>("Id")
+                        .HasColumnType("TEXT");
+
+                    b.Property<Guid>("BatchId")
+                        .HasColumnType("TEXT");
+
+                    b.Property<string>("Bottle")
+                        .IsRequired()
+                        .HasColumnType("TEXT");
+
+                    b.PrimitiveCollection<string>("Cells")
+                        .IsRequired()
+                        .HasColumnType("TEXT");
+
+                    b.Property<double?>("ExpectedHighPpm")
+                        .HasColumnType("REAL");
+
+                    b.Property<double?>("ExpectedLowPpm")
+                        .HasColumnType("REAL");
+
+                    b.Property<double?>("OilTemperatureC")
+                        .HasColumnType("REAL");
+
+                    b.Property<int>("Ordinal")
+                        .HasColumnType("INTEGER");
+
+                    b.Property<string>("Point")
+                        .IsRequired()
+                        .HasMaxLength(40)
+                        .HasColumnType("TEXT");
+
+                    b.Property<long?>("ReleasedAt")
+                        .HasColumnType("INTEGER");
+
+                    b.Property<Guid>("ReservoirId")
+                        .HasColumnType("TEXT");
+
+                    b.Property<double?>("SaturationPpm")
+                        .HasColumnType("REAL");
+
+                    b.Property<long>("SavedAt")
+                        .HasColumnType("INTEGER");
+
+                    b.Property<bool>("SetAside")
+                        .HasColumnType("INTEGER");
+
+                    b.Property<string>("Tag")
+                        .IsRequired()
+                        .HasColumnType("TEXT");
+
+                    b.Property<long>("TakenAt")
+                        .HasColumnType("INTEGER");
+
+                    b.HasKey("Id");
+
+                    b.HasIndex("BatchId");
+
+                    b.HasIndex("Bottle");
+
+                    b.ToTable("bench_rows", (string)null);
+                });
+
+            modelBuilder.Entity("Plant.Register.Laboratory.Bottle", b =>
+                {
+                    b.Property<Guid>("Id")
+                        .HasColumnType("TEXT");
+
+                    b.Property<string>("Code")
+                        .IsRequired()
+                        .HasColumnType("TEXT");
+
+                    b.Property<double?>("OilTemperatureC")
+                        .HasColumnType("REAL");
+
+                    b.Property<string>("Point")
+                        .IsRequired()
+                        .HasMaxLength(40)
+                        .HasColumnType("TEXT");
+
+                    b.Property<Guid>("ReservoirId")
+                        .HasColumnType("TEXT");
+
+                    b.Property<long>("TakenAt")
+                        .HasColumnType("INTEGER");
+
+                    b.Property<string>("TakenBy")
+                        .IsRequired()
+                        .HasColumnType("TEXT");
+
+                    b.Property<Guid>("Token")
+                        .IsConcurrencyToken()
+                        .HasColumnType("TEXT");
+
+                    b.Property<long?>("WithdrawnAt")
+                        .HasColumnType("INTEGER");
+
+                    b.HasKey("Id");
+
+                    b.HasIndex("Code")
+                        .IsUnique();
+
+                    b.HasIndex("ReservoirId");
+
+                    b.ToTable("bottles", (string)null);
+                });
+
             modelBuilder.Entity("Plant.Register.Reservoirs.Area", b =>
                 {
                     b.Property<Guid>("Id")
@@ -891,6 +1053,22 @@ namespace Plant.Register.Sqlite.Migrations
                     b.ToTable("rounds", (string)null);
                 });
 
+            modelBuilder.Entity("Plant.Register.WorkOrders.OrderLook", b =>
+                {
+                    b.Property<Guid>("OrderId")
+                        .HasColumnType("TEXT");
+
+                    b.Property<string>("Person")
+                        .HasColumnType("TEXT");
+
+                    b.Property<long>("At")
+                        .HasColumnType("INTEGER");
+
+                    b.HasKey("OrderId", "Person");
+
+                    b.ToTable("order_looks", (string)null);
+                });
+
             modelBuilder.Entity("Plant.Register.WorkOrders.WorkOrder", b =>
                 {
                     b.Property<Guid>("Id")
@@ -903,12 +1081,48 @@ namespace Plant.Register.Sqlite.Migrations
                     b.Property<long>("CreatedAt")
                         .HasColumnType("INTEGER");
 
+                    b.Property<long?>("DecidedAt")
+                        .HasColumnType("INTEGER");
+
+                    b.Property<string>("DecidedBy")
+                        .HasColumnType("TEXT");
+
+                    b.Property<long?>("DoneAt")
+                        .HasColumnType("INTEGER");
+
+                    b.Property<string>("DoneBy")
+                        .HasColumnType("TEXT");
+
+                    b.Property<double?>("DrainedOilL")
+                        .HasColumnType("REAL");
+
+                    b.Property<double?>("DrainedWaterL")
+                        .HasColumnType("REAL");
+
                     b.Property<long?>("DueAt")
                         .HasColumnType("INTEGER");
+
+                    b.Property<string>("Evidence")
+                        .HasColumnType("TEXT");
+
+                    b.Property<double?>("ExpectedHighPpm")
+                        .HasColumnType("REAL");
+
+                    b.Property<double?>("ExpectedLowPpm")
+                        .HasColumnType("REAL");
+
+                    b.Property<string>("Findings")
+                        .HasColumnType("TEXT");
+
+                    b.Property<double?>("FoundPpm")
+                        .HasColumnType("REAL");
 
                     b.Property<string>("Kind")
                         .IsRequired()
                         .HasMaxLength(40)
+                        .HasColumnType("TEXT");
+
+                    b.Property<string>("Note")
                         .HasColumnType("TEXT");
 
                     b.Property<string>("Number")
@@ -922,10 +1136,19 @@ namespace Plant.Register.Sqlite.Migrations
                     b.Property<Guid>("ReservoirId")
                         .HasColumnType("TEXT");
 
+                    b.Property<double?>("RunHours")
+                        .HasColumnType("REAL");
+
+                    b.Property<string>("Separator")
+                        .HasColumnType("TEXT");
+
                     b.Property<string>("State")
                         .IsRequired()
                         .HasMaxLength(40)
                         .HasColumnType("TEXT");
+
+                    b.Property<long?>("SubmittedAt")
+                        .HasColumnType("INTEGER");
 
                     b.Property<string>("Task")
                         .IsRequired()
@@ -933,6 +1156,9 @@ namespace Plant.Register.Sqlite.Migrations
 
                     b.Property<Guid>("Token")
                         .IsConcurrencyToken()
+                        .HasColumnType("TEXT");
+
+                    b.Property<string>("VerifiedBySample")
                         .HasColumnType("TEXT");
 
                     b.Property<long?>("WithdrawnAt")
@@ -1050,6 +1276,26 @@ namespace Plant.Register.Sqlite.Migrations
                         .IsRequired();
                 });
 
+            modelBuilder.Entity("Plant.Register.Laboratory.BenchRow", b =>
+                {
+                    b.HasOne("Plant.Register.Laboratory.BenchBatch", null)
+                        .WithMany("Rows")
+                        .HasForeignKey("BatchId")
+                        .OnDelete(DeleteBehavior.Cascade)
+                        .IsRequired();
+                });
+
+            modelBuilder.Entity("Plant.Register.Laboratory.Bottle", b =>
+                {
+                    b.HasOne("Plant.Register.Reservoirs.Reservoir", "Reservoir")
+                        .WithMany()
+                        .HasForeignKey("ReservoirId")
+                        .OnDelete(DeleteBehavior.Restrict)
+                        .IsRequired();
+
+                    b.Navigation("Reservoir");
+                });
+
             modelBuilder.Entity("Plant.Register.Reservoirs.Area", b =>
                 {
                     b.HasOne("Plant.Register.Reservoirs.Site", null)
@@ -1148,6 +1394,11 @@ namespace Plant.Register.Sqlite.Migrations
                         .IsRequired();
 
                     b.Navigation("Reservoir");
+                });
+
+            modelBuilder.Entity("Plant.Register.Laboratory.BenchBatch", b =>
+                {
+                    b.Navigation("Rows");
                 });
 #pragma warning restore 612, 618
         }

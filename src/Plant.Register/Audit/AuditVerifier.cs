@@ -111,6 +111,7 @@ public sealed class AuditVerifier(IDbContextFactory<PlantDbContext> contexts, ID
         "separator-run" => context.SeparatorRuns.AsNoTracking(),
         "work-order" => context.WorkOrders.AsNoTracking(),
         "round" => context.Rounds.AsNoTracking(),
+        "bottle" => context.Bottles.AsNoTracking(),
         _ => null,
     };
 }

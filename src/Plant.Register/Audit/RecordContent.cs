@@ -3,6 +3,7 @@ using System.Text;
 using System.Text.Json;
 using System.Text.Json.Serialization;
 using System.Text.Json.Serialization.Metadata;
+using Plant.Register.Laboratory;
 using Plant.Register.Reservoirs;
 using Plant.Register.Samples;
 using Plant.Register.Separators;
@@ -31,6 +32,7 @@ public static class RecordContent
         [typeof(SeparatorRunEvent)] = "separator-run",
         [typeof(WorkOrder)] = "work-order",
         [typeof(DrainRound)] = "round",
+        [typeof(Bottle)] = "bottle",
     };
 
     private static readonly JsonSerializerOptions Options = new()

@@ -11,6 +11,9 @@ public static class CsvText
     /// <summary>Text with a quote before what a spreadsheet would take for a formula; a text that begins so already gets one more.</summary>
     public static string Neutralise(string text) => NeedsQuote(text) ? "'" + text : text;
 
+    /// <summary>Text as a quoted cell.</summary>
+    public static string Quote(string text) => $"\"{Neutralise(text).Replace("\"", "\"\"", StringComparison.Ordinal)}\"";
+
     /// <summary>Undoes <see cref="Neutralise"/>.</summary>
     public static string Restore(string text) => text.Length > 1 && text[0] == '\'' && NeedsQuote(text.AsSpan(1)) ? text[1..] : text;
 

@@ -4,6 +4,7 @@ using Microsoft.EntityFrameworkCore;
 using Microsoft.EntityFrameworkCore.Storage.ValueConversion;
 using Plant.Register.Access;
 using Plant.Register.Audit;
+using Plant.Register.Laboratory;
 using Plant.Register.Reservoirs;
 using Plant.Register.Samples;
 using Plant.Register.Separators;
@@ -38,7 +39,15 @@ public sealed class PlantDbContext(DbContextOptions<PlantDbContext> options)
 
     public DbSet<WorkOrder> WorkOrders => Set<WorkOrder>();
 
+    public DbSet<OrderLook> OrderLooks => Set<OrderLook>();
+
     public DbSet<DrainRound> Rounds => Set<DrainRound>();
+
+    public DbSet<Bottle> Bottles => Set<Bottle>();
+
+    public DbSet<BenchBatch> BenchBatches => Set<BenchBatch>();
+
+    public DbSet<BenchRow> BenchRows => Set<BenchRow>();
 
     public DbSet<ApiToken> ApiTokens => Set<ApiToken>();
 

@@ -104,6 +104,7 @@ public abstract class RecordService<TRecord, TFields>(IDbContextFactory<PlantDbC
 
             RegisterWriter.Expect(context, record, token);
             Apply(record, fields, references);
+            Amended(record, actor);
             record.WithdrawnAt = null;
             if (context.Entry(record).State == EntityState.Unchanged && record.Token != token)
             {
@@ -127,6 +128,11 @@ public abstract class RecordService<TRecord, TFields>(IDbContextFactory<PlantDbC
             if (record is null)
             {
                 return Outcome<TRecord>.Refused(OutcomeKind.NotFound, $"there is no {idOrKey}");
+            }
+
+            if (MayAmend(record, actor) is { } refusal)
+            {
+                return Outcome<TRecord>.Refused(OutcomeKind.Forbidden, refusal);
             }
 
             if (record.WithdrawnAt is null)
@@ -166,8 +172,13 @@ public abstract class RecordService<TRecord, TFields>(IDbContextFactory<PlantDbC
     /// <summary>The key of a record does not change; what it is called is what it is.</summary>
     protected abstract void CheckKey(TRecord record, TFields fields, List<Refusal> refusals);
 
-    /// <summary>Why this actor may not amend this record; null where it may.</summary>
+    /// <summary>Why this actor may not amend or withdraw this record; null where it may.</summary>
     protected virtual string? MayAmend(TRecord record, Actor actor) => null;
+
+    /// <summary>What else an amendment changes.</summary>
+    protected virtual void Amended(TRecord record, Actor actor)
+    {
+    }
 
     protected static void KeyStays(List<Refusal> refusals, string field, string? given, string recorded)
     {

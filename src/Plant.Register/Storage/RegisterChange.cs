@@ -2,6 +2,7 @@ using Microsoft.EntityFrameworkCore;
 using Plant.Register.Reservoirs;
 using Plant.Register.Samples;
 using Plant.Register.Separators;
+using Plant.Register.WorkOrders;
 
 namespace Plant.Register.Storage;
 
@@ -28,6 +29,7 @@ public sealed record RegisterChange(IReadOnlySet<Guid> ReservoirIds, bool WholeF
                 case DrainEvent drain: ids.Add(drain.ReservoirId); break;
                 case TopUpEvent topUp: ids.Add(topUp.ReservoirId); break;
                 case SeparatorRunEvent run: ids.Add(run.ReservoirId); break;
+                case WorkOrder order: ids.Add(order.ReservoirId); break;
                 case Fluid or Separator: all = true; break;
             }
         }

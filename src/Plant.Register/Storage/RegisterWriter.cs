@@ -31,6 +31,11 @@ public sealed class RegisterWriter(IDbContextFactory<PlantDbContext> contexts, I
         await using (var write = await engine.BeginWriteAsync(context, cancellation))
         {
             Outcome<T> outcome;
+            if (actor.PersonId is { } person && !await StillMayAsync(context, person, actor, cancellation))
+            {
+                return Outcome<T>.Refused(OutcomeKind.Forbidden, $"the roles of {actor.Name} have changed: sign in again");
+            }
+
             try
             {
                 outcome = await change(context, cancellation);
@@ -58,13 +63,25 @@ public sealed class RegisterWriter(IDbContextFactory<PlantDbContext> contexts, I
                 return Outcome<T>.Refused(OutcomeKind.Conflict, "a record with this key exists already; read it and amend it instead");
             }
 
-            Changed?.Invoke(done);
+            if (done.WholeFleet || done.ReservoirIds.Count > 0)
+            {
+                Changed?.Invoke(done);
+            }
+
             return outcome;
         }
     }
 
     /// <summary>Both databases keep times to the millisecond, so what is hashed must not be finer.</summary>
     private static DateTime Milliseconds(DateTimeOffset time) => DateTimeOffset.FromUnixTimeMilliseconds(time.ToUnixTimeMilliseconds()).UtcDateTime;
+
+    /// <summary>A role that was taken away, or an account that was closed, works at the next write.</summary>
+    private static async Task<bool> StillMayAsync(PlantDbContext context, Guid person, Actor actor, CancellationToken cancellation)
+    {
+        var roles = await context.UserRoles.Where(r => r.UserId == person && context.Users.Any(u => u.Id == person && !u.Disabled))
+            .Join(context.Roles, r => r.RoleId, role => role.Id, (_, role) => role.Name!).ToListAsync(cancellation);
+        return actor.Roles.All(roles.Contains);
+    }
 
     private static async Task<string> StaleMessageAsync(PlantDbContext context, DbUpdateConcurrencyException stale, CancellationToken cancellation)
     {

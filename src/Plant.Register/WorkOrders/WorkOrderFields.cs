@@ -24,6 +24,51 @@ public sealed record WorkOrderFields : IFields
     /// <summary>Read only.</summary>
     public string? Author { get; set; }
 
+    /// <summary>Read only.</summary>
+    public DateTimeOffset? SubmittedAt { get; set; }
+
+    /// <summary>Read only.</summary>
+    public string? DecidedBy { get; set; }
+
+    /// <summary>Read only.</summary>
+    public DateTimeOffset? DecidedAt { get; set; }
+
+    /// <summary>Read only.</summary>
+    public string? Note { get; set; }
+
+    /// <summary>Read only.</summary>
+    public string? DoneBy { get; set; }
+
+    /// <summary>Read only.</summary>
+    public DateTimeOffset? DoneAt { get; set; }
+
+    /// <summary>Read only.</summary>
+    public string? Findings { get; set; }
+
+    /// <summary>Read only.</summary>
+    public double? DrainedWaterL { get; set; }
+
+    /// <summary>Read only.</summary>
+    public double? DrainedOilL { get; set; }
+
+    /// <summary>Read only.</summary>
+    public string? Separator { get; set; }
+
+    /// <summary>Read only.</summary>
+    public double? RunHours { get; set; }
+
+    /// <summary>Read only.</summary>
+    public string? VerifiedBySample { get; set; }
+
+    /// <summary>Read only.</summary>
+    public double? FoundPpm { get; set; }
+
+    /// <summary>Read only.</summary>
+    public double? ExpectedLowPpm { get; set; }
+
+    /// <summary>Read only.</summary>
+    public double? ExpectedHighPpm { get; set; }
+
     public void Check(List<Refusal> refusals)
     {
         refusals.Required("number", Number, 40);

@@ -5,7 +5,7 @@ using Plant.Register.Storage;
 
 namespace Plant.Register.WorkOrders;
 
-/// <summary>Work orders as drafts: made, changed and withdrawn by those who plan work.</summary>
+/// <summary>Work orders as they are written: made and changed by those who plan work. <see cref="WorkOrderSteps"/> moves them.</summary>
 public sealed class WorkOrderService(IDbContextFactory<PlantDbContext> contexts, RegisterWriter writer, TimeProvider clock)
     : RecordService<WorkOrder, WorkOrderFields>(contexts, writer)
 {
@@ -53,10 +53,27 @@ public sealed class WorkOrderService(IDbContextFactory<PlantDbContext> contexts,
         Kind = Code.Of(record.Kind),
         Task = record.Task,
         Reason = record.Reason,
-        DueAt = record.DueAt is { } time ? new DateTimeOffset(time, TimeSpan.Zero) : null,
+        DueAt = Offset(record.DueAt),
         State = Code.Of(record.State),
         Author = record.Author,
+        SubmittedAt = Offset(record.SubmittedAt),
+        DecidedBy = record.DecidedBy,
+        DecidedAt = Offset(record.DecidedAt),
+        Note = record.Note,
+        DoneBy = record.DoneBy,
+        DoneAt = Offset(record.DoneAt),
+        Findings = record.Findings,
+        DrainedWaterL = record.DrainedWaterL,
+        DrainedOilL = record.DrainedOilL,
+        Separator = record.Separator,
+        RunHours = record.RunHours,
+        VerifiedBySample = record.VerifiedBySample,
+        FoundPpm = record.FoundPpm,
+        ExpectedLowPpm = record.ExpectedLowPpm,
+        ExpectedHighPpm = record.ExpectedHighPpm,
     };
+
+    private static DateTimeOffset? Offset(DateTime? time) => time is { } at ? new DateTimeOffset(at, TimeSpan.Zero) : null;
 
     protected override void CheckKey(WorkOrder record, WorkOrderFields fields, List<Refusal> refusals)
     {
@@ -64,8 +81,8 @@ public sealed class WorkOrderService(IDbContextFactory<PlantDbContext> contexts,
         KeyStays(refusals, "tag", fields.Tag, record.Reservoir!.Tag);
     }
 
-    protected override string? MayAmend(WorkOrder record, Actor actor) =>
-        record.State != WorkOrderState.Draft ? $"{record.Number} is {Code.Of(record.State)}: only a draft is changed"
-        : record.Author != actor.Name && !actor.Is(PlantRole.Administrator) ? $"{record.Number} is a draft of {record.Author}: only its author changes it"
-        : null;
+    protected override string? MayAmend(WorkOrder record, Actor actor) => WorkOrderRules.AmendRefusal(record.Number, record.State, record.Author, actor);
+
+    /// <summary>Who changes what is to be decided becomes its author.</summary>
+    protected override void Amended(WorkOrder record, Actor actor) => record.Author = actor.Name;
 }

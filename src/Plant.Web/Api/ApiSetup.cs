@@ -3,6 +3,7 @@ using System.Text.Json.Serialization;
 using Microsoft.AspNetCore.Antiforgery;
 using Plant.Physics.Calculators;
 using Plant.Register.Access;
+using Plant.Register.Laboratory;
 using Plant.Register.Reservoirs;
 using Plant.Register.Samples;
 using Plant.Register.Separators;
@@ -51,6 +52,8 @@ public static class ApiSetup
         api.MapRecords<SeparatorRunEvent, SeparatorRunFields, SeparatorRunService>("separator-runs", Duty.RecordWork);
         api.MapRecords<WorkOrder, WorkOrderFields, WorkOrderService>("work-orders", Duty.PlanWork);
         api.MapRecords<DrainRound, RoundFields, RoundService>("rounds", Duty.PlanWork);
+        api.MapRecords<Bottle, BottleFields, BottleService>("bottles", Duty.RecordWork);
+        api.MapWorkOrderSteps();
         api.MapReadings();
         api.MapAssessments();
         var calculators = api.MapGroup("/calc").RequireAuthorization(Duty.Read.ToString()).WithTags("calculators");

@@ -85,7 +85,8 @@ public static class RecordEndpoints
             .RequireAuthorization(write.ToString()).Produces<TFields>().ProducesProblem(StatusCodes.Status412PreconditionFailed);
     }
 
-    private static IResult Answer<TFields>(HttpContext http, Outcome<Recorded<TFields>> outcome, int status)
+    /// <summary>The record with its version.</summary>
+    public static IResult Answer<TFields>(HttpContext http, Outcome<Recorded<TFields>> outcome, int status)
     {
         if (!outcome.IsDone)
         {
@@ -109,7 +110,8 @@ public static class RecordEndpoints
         return row;
     }
 
-    private static IResult? IfMatch(HttpRequest request, out Guid token)
+    /// <summary>The version that the caller read.</summary>
+    public static IResult? IfMatch(HttpRequest request, out Guid token)
     {
         var header = request.Headers.IfMatch.ToString();
         token = Guid.Empty;

@@ -19,6 +19,6 @@ public static class LookServices
                 options.JSInteropDefaultCallTimeout = ScriptLimit;
             })
             .AddHubOptions(options => options.MaximumReceiveMessageSize = HubMessageLimit);
-        return services.AddMudServices();
+        return services.AddMudServices().AddSingleton<LiveRegister>();
     }
 }

@@ -34,10 +34,27 @@ public sealed class AccessibilityTests(PlantBrowser plant)
         foreach (var page in new[]
         {
             "/", "/?condition=free-water", "/?q=nothing-fits", $"/reservoirs/{tag}", "/reservoirs/none", "/register", "/register/reservoirs/new", $"/register/reservoirs/{tag}/edit",
-            "/register/fluids/new", "/register/import", "/account",
+            "/register/fluids/new", "/register/fluids/TURB-46/edit", "/register/import", "/account", "/account/confirm", "/orders", "/orders/none", "/bench", $"/t/{tag}", "/records", "/records?kind=fluid",
         })
         {
             await CheckAsync(visit, page, found);
+        }
+
+        await using (var planner = await plant.VisitAsync("planner", dark, width))
+        {
+            await planner.Page.GotoAsync($"/?chosen={tag}");
+            await CheckAsync(planner, $"/?chosen={tag}", found);
+            await planner.Page.GotoAsync($"/reservoirs/{tag}");
+            await planner.Page.GetByRole(Microsoft.Playwright.AriaRole.Button, new() { Name = "Draft an order" }).ClickAsync();
+            await planner.LiveAsync();
+            await planner.Page.GetByRole(Microsoft.Playwright.AriaRole.Button, new() { Name = "Submit" }).ClickAsync();
+            await planner.Page.GetByText("is submitted").WaitForAsync();
+            await CheckAsync(planner, new Uri(planner.Page.Url).PathAndQuery, found);
+        }
+
+        await using (var supervisor = await plant.VisitAsync("supervisor", dark, width))
+        {
+            await CheckAsync(supervisor, "/approvals", found);
         }
 
         Assert.True(found.Count == 0, string.Join("\n", found));

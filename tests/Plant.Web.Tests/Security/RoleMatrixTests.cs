@@ -63,12 +63,13 @@ public sealed class RoleMatrixTests(WebPlant plant)
         _ => "yes",
     };
 
-    private static string Example(string route) => System.Text.RegularExpressions.Regex.Replace(route.Replace("{documentName}", "v1", StringComparison.Ordinal), @"\{[^}]+\}", "none");
+    private static string Example(string route) => System.Text.RegularExpressions.Regex.Replace(route.Replace("{documentName}", "v1", StringComparison.Ordinal), @"\{[^}]+\}", place =>
+        place.Value.EndsWith(":guid}", StringComparison.Ordinal) ? Guid.Empty.ToString() : place.Value.EndsWith(":int}", StringComparison.Ordinal) ? "0" : "none");
 
     private IEnumerable<string> Served() =>
         from endpoint in plant.Services.GetRequiredService<EndpointDataSource>().Endpoints.OfType<RouteEndpoint>()
         let route = "/" + endpoint.RoutePattern.RawText!.Trim('/')
-        where !route.StartsWith("/_", StringComparison.Ordinal) && !Path.HasExtension(route.Replace("{documentName}.json", "x", StringComparison.Ordinal)) || route is "/fleet.csv"
+        where !route.StartsWith("/_", StringComparison.Ordinal) && !Path.HasExtension(route.Replace("{documentName}.json", "x", StringComparison.Ordinal)) || route is "/fleet.csv" or "/records.csv"
         where !route.Contains("{**", StringComparison.Ordinal)
         let methods = endpoint.Metadata.GetMetadata<ComponentTypeMetadata>() is not null ? ["GET"] : endpoint.Metadata.GetMetadata<HttpMethodMetadata>()?.HttpMethods ?? ["GET"]
         from method in methods

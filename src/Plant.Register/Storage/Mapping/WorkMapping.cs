@@ -28,6 +28,10 @@ internal static class WorkMapping
         order.Property(o => o.State).AsCode();
         order.HasOne(o => o.Reservoir).WithMany().HasForeignKey(o => o.ReservoirId).OnDelete(DeleteBehavior.Restrict);
 
+        var look = model.Entity<OrderLook>();
+        look.ToTable("order_looks");
+        look.HasKey(l => new { l.OrderId, l.Person });
+
         var round = model.Record<DrainRound>("rounds");
         round.HasIndex(r => r.Code).IsUnique();
 

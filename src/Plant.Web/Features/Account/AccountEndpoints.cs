@@ -18,6 +18,8 @@ public static class AccountEndpoints
         account.MapPost("/demo", DemoAsync).AllowAnonymous();
         account.MapPost("/first", FirstAsync).AllowAnonymous().RequireRateLimiting(AccountServices.SignInLimit);
         account.MapPost("/sign-out", SignOutAsync).AllowAnonymous();
+        account.MapPost("/confirm", ConfirmAsync).RequireRateLimiting(AccountServices.SignInLimit);
+        account.MapPost("/everywhere", EverywhereAsync).RequireRateLimiting(AccountServices.SignInLimit);
         account.MapPost("/password", PasswordAsync).RequireRateLimiting(AccountServices.SignInLimit);
     }
 
@@ -26,7 +28,7 @@ public static class AccountEndpoints
         address is { Length: > 0 } && address[0] == '/' && (address.Length == 1 || address[1] is not ('/' or '\\')) ? address : "/";
 
     private static async Task<IResult> SignInAsync(
-        SignInManager<PlantUser> signIn, UserManager<PlantUser> users, [FromForm] string? email, [FromForm] string? password, [FromForm] string? returnUrl)
+        SignInManager<PlantUser> signIn, UserManager<PlantUser> users, TimeProvider clock, [FromForm] string? email, [FromForm] string? password, [FromForm] string? returnUrl)
     {
         var user = await users.FindByEmailAsync(email ?? string.Empty);
         if (user is null)
@@ -36,14 +38,18 @@ public static class AccountEndpoints
             return Failed("wrong", returnUrl);
         }
 
-        var result = user.Disabled ? SignInResult.NotAllowed : await signIn.PasswordSignInAsync(user, password ?? string.Empty, isPersistent: false, lockoutOnFailure: true);
-        return result.Succeeded
-            ? TypedResults.LocalRedirect(user.MustChangePassword ? "/account" : Local(returnUrl))
-            : Failed(result.IsLockedOut ? "locked" : "wrong", returnUrl);
+        var result = user.Disabled ? SignInResult.NotAllowed : await signIn.CheckPasswordSignInAsync(user, password ?? string.Empty, lockoutOnFailure: true);
+        if (!result.Succeeded)
+        {
+            return Failed(result.IsLockedOut ? "locked" : "wrong", returnUrl);
+        }
+
+        await signIn.SignInWithClaimsAsync(user, isPersistent: false, [PlantClaims.Confirmed(clock.GetUtcNow())]);
+        return TypedResults.LocalRedirect(user.MustChangePassword ? "/account" : Local(returnUrl));
     }
 
     private static async Task<IResult> DemoAsync(
-        SignInManager<PlantUser> signIn, UserManager<PlantUser> users, DemoPeople demo, [FromForm] string? role, [FromForm] string? returnUrl)
+        SignInManager<PlantUser> signIn, UserManager<PlantUser> users, DemoPeople demo, TimeProvider clock, [FromForm] string? role, [FromForm] string? returnUrl)
     {
         var user = demo.Offered && role is not null ? await users.FindByEmailAsync(DemoPeople.EmailOf(role)) : null;
         if (user is null)
@@ -51,7 +57,7 @@ public static class AccountEndpoints
             return TypedResults.NotFound();
         }
 
-        await signIn.SignInAsync(user, isPersistent: false);
+        await signIn.SignInWithClaimsAsync(user, isPersistent: false, [PlantClaims.Confirmed(clock.GetUtcNow())]);
         return TypedResults.LocalRedirect(Local(returnUrl));
     }
 
@@ -101,6 +107,43 @@ public static class AccountEndpoints
         await users.UpdateAsync(user);
         await signIn.RefreshSignInAsync(user);
         return Back("/account", "The password was changed.");
+    }
+
+    /// <summary>Who is signed in proves it again: an approval asks for it after ten minutes.</summary>
+    private static async Task<IResult> ConfirmAsync(
+        ClaimsPrincipal principal, SignInManager<PlantUser> signIn, UserManager<PlantUser> users, DemoPeople demo, TimeProvider clock, [FromForm] string? password, [FromForm] string? returnUrl)
+    {
+        var user = await users.GetUserAsync(principal);
+        if (user is null)
+        {
+            return TypedResults.LocalRedirect("/account/sign-in");
+        }
+
+        var proven = (demo.Offered && DemoPeople.IsDemo(user)) || (await signIn.CheckPasswordSignInAsync(user, password ?? string.Empty, lockoutOnFailure: true)).Succeeded;
+        if (!proven)
+        {
+            return TypedResults.LocalRedirect($"/account/confirm?failed=wrong&returnUrl={Uri.EscapeDataString(Local(returnUrl))}");
+        }
+
+        await signIn.SignInWithClaimsAsync(user, isPersistent: false, [PlantClaims.Confirmed(clock.GetUtcNow())]);
+        return TypedResults.LocalRedirect(Local(returnUrl));
+    }
+
+    /// <summary>Ends every session of this person, this one too.</summary>
+    private static async Task<IResult> EverywhereAsync(ClaimsPrincipal principal, SignInManager<PlantUser> signIn, UserManager<PlantUser> users, IAntiforgery antiforgery, HttpContext context)
+    {
+        if (!await antiforgery.IsRequestValidAsync(context))
+        {
+            return TypedResults.BadRequest();
+        }
+
+        if (await users.GetUserAsync(principal) is { } user)
+        {
+            await users.UpdateSecurityStampAsync(user);
+        }
+
+        await signIn.SignOutAsync();
+        return TypedResults.LocalRedirect("/account/sign-in");
     }
 
     private static async Task<string?> WeaknessAsync(UserManager<PlantUser> users, PlantUser user, string? password)

@@ -47,7 +47,20 @@ public static class AccountServices
             .AddScheme<AuthenticationSchemeOptions, TokenHandler>(TokenHandler.SchemeName, null)
             .AddIdentityCookies();
         services.ConfigureApplicationCookie(Cookie);
-        services.Configure<SecurityStampValidatorOptions>(options => options.ValidationInterval = TimeSpan.FromMinutes(1));
+        services.Configure<SecurityStampValidatorOptions>(options =>
+        {
+            options.ValidationInterval = TimeSpan.FromMinutes(1);
+            options.OnRefreshingPrincipal = context =>
+            {
+                // renewing the roles is no new proof of who it is, and does not undo the old one
+                if (context.CurrentPrincipal?.FindFirst(PlantClaims.ConfirmedAt) is { } proof)
+                {
+                    context.NewPrincipal?.Identities.First().AddClaim(proof);
+                }
+
+                return Task.CompletedTask;
+            };
+        });
         services.AddAuthorization(options =>
         {
             foreach (var duty in Enum.GetValues<Duty>())

@@ -9,6 +9,9 @@ public sealed class DemoPeople(IDbContextFactory<PlantDbContext> contexts, Peopl
 {
     public bool Offered => environment.IsDevelopment();
 
+    /// <summary>True for one of the demo plant's people.</summary>
+    public static bool IsDemo(PlantUser user) => PlantRole.ForPeople.Any(role => EmailOf(role) == user.Email);
+
     public static string EmailOf(string role) => $"{role}@demo.invalid";
 
     /// <summary>Makes those who are missing, with passwords that nobody knows.</summary>

@@ -1,3 +1,4 @@
+using System.Globalization;
 using System.Security.Claims;
 using Microsoft.AspNetCore.Identity;
 using Microsoft.Extensions.Options;
@@ -11,9 +12,19 @@ public static class PlantClaims
     /// <summary>Carried until a one-time password was replaced.</summary>
     public const string MustChangePassword = "must-change-password";
 
+    /// <summary>When the person last proved who it is, in Unix seconds.</summary>
+    public const string ConfirmedAt = "auth_time";
+
     public static Actor ToActor(this ClaimsPrincipal principal) => new(
         principal.Identity?.Name ?? "nobody",
-        principal.FindAll(ClaimTypes.Role).Select(claim => claim.Value).ToHashSet(StringComparer.Ordinal));
+        principal.FindAll(ClaimTypes.Role).Select(claim => claim.Value).ToHashSet(StringComparer.Ordinal))
+    {
+        PersonId = Guid.TryParse(principal.FindFirstValue(ClaimTypes.NameIdentifier), out var id) ? id : null,
+        ConfirmedAt = long.TryParse(principal.FindFirstValue(ConfirmedAt), NumberStyles.None, CultureInfo.InvariantCulture, out var seconds) ? DateTimeOffset.FromUnixTimeSeconds(seconds).UtcDateTime : null,
+    };
+
+    /// <summary>The claim of a proof made now.</summary>
+    public static Claim Confirmed(DateTimeOffset now) => new(ConfirmedAt, now.ToUnixTimeSeconds().ToString(CultureInfo.InvariantCulture));
 }
 
 /// <summary>Adds the roles and what the sign-in must still do.</summary>

@@ -28,7 +28,7 @@ public sealed class TokenHandler(IOptionsMonitor<AuthenticationSchemeOptions> op
             return AuthenticateResult.Fail("the token is unknown, revoked or has expired");
         }
 
-        var identity = new ClaimsIdentity([new Claim(ClaimTypes.Name, actor.Name), .. actor.Roles.Select(role => new Claim(ClaimTypes.Role, role))], SchemeName);
+        var identity = new ClaimsIdentity([new Claim(ClaimTypes.Name, actor.Name), PlantClaims.Confirmed(TimeProvider.GetUtcNow()), .. actor.Roles.Select(role => new Claim(ClaimTypes.Role, role))], SchemeName);
         return AuthenticateResult.Success(new AuthenticationTicket(new ClaimsPrincipal(identity), SchemeName));
     }
 

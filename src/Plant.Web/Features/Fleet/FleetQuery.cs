@@ -28,6 +28,15 @@ public sealed record FleetQuery
 
     public int Page { get; init; } = 1;
 
+    /// <summary>Tags that are chosen, with commas between them.</summary>
+    public string? Chosen { get; init; }
+
+    /// <summary>The chosen tags.</summary>
+    public IReadOnlyList<string> ChosenTags => Chosen?.Split(',', StringSplitOptions.RemoveEmptyEntries | StringSplitOptions.TrimEntries) ?? [];
+
+    /// <summary>The same list with a tag chosen, or no more.</summary>
+    public FleetQuery Toggled(string tag) => this with { Chosen = string.Join(',', ChosenTags.Contains(tag) ? ChosenTags.Where(t => t != tag) : [.. ChosenTags, tag]) };
+
     /// <summary>The address of the page with this state.</summary>
     public string Address(string path = "/")
     {
@@ -48,6 +57,7 @@ public sealed record FleetQuery
         Add("order", Order == "drain" ? null : Order);
         Add("desc", Descending ? "true" : null);
         Add("page", Page > 1 ? Page.ToString(System.Globalization.CultureInfo.InvariantCulture) : null);
+        Add("chosen", Chosen);
         return QueryHelpers.AddQueryString(path, query);
     }
 

@@ -3,6 +3,7 @@ using Microsoft.AspNetCore.Components.Authorization;
 using Plant.Physics.Fluids;
 using Plant.Register.Reservoirs;
 using Plant.Web.Features.Account;
+using Plant.Web.Shared.Forms;
 
 namespace Plant.Web.Features.Register;
 

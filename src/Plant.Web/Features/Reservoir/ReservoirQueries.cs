@@ -29,7 +29,7 @@ public sealed class ReservoirQueries(IDbContextFactory<PlantDbContext> contexts,
         var history = (await histories.ReadAsync(asOf, [tag], cancellation))[0];
         var working = new Working();
         var assessment = Assessor.Assess(history, asOf, rule, working);
-        return new ReservoirView(ReservoirService.FieldsOf(reservoir), reservoir.Fluid!.Name, history, assessment, working.Steps, Forecaster.Observed(history, asOf),
+        return new ReservoirView(reservoir.Id, ReservoirService.FieldsOf(reservoir), reservoir.Fluid!.Name, history, assessment, working.Steps, Forecaster.Observed(history, asOf),
             Forecaster.Forecast(history, asOf, rule, ForecastDays), equipment.ConvertAll(s => SeparatorService.FieldsOf(s, tag)));
     }
 }

@@ -7,6 +7,7 @@ using Plant.Register.Separators;
 namespace Plant.Web.Features.Reservoir;
 
 /// <summary>All that the reservoir page shows.</summary>
+/// <param name="Id">Id of the reservoir.</param>
 /// <param name="Fields">The register's columns.</param>
 /// <param name="FluidName">Name of the fluid.</param>
 /// <param name="History">The records.</param>
@@ -16,5 +17,5 @@ namespace Plant.Web.Features.Reservoir;
 /// <param name="Forecast">By the day, if nobody does anything.</param>
 /// <param name="Equipment">Separators that stand at it.</param>
 public sealed record ReservoirView(
-    ReservoirFields Fields, string FluidName, ReservoirHistory History, Assessment Assessment, IReadOnlyList<WorkingStep> Steps,
+    Guid Id, ReservoirFields Fields, string FluidName, ReservoirHistory History, Assessment Assessment, IReadOnlyList<WorkingStep> Steps,
     IReadOnlyList<Observation> Observations, IReadOnlyList<ForecastDay> Forecast, IReadOnlyList<SeparatorFields> Equipment);

@@ -1,7 +1,7 @@
 using Bunit;
-using Plant.Web.Features.Register;
+using Plant.Web.Shared.Forms;
 
-namespace Plant.Web.Tests.Features.Register;
+namespace Plant.Web.Tests.Shared.Forms;
 
 public sealed class UnitFieldTests : BunitContext
 {

@@ -1,6 +1,6 @@
-using Plant.Web.Features.Register;
+using Plant.Web.Shared.Forms;
 
-namespace Plant.Web.Tests.Features.Register;
+namespace Plant.Web.Tests.Shared.Forms;
 
 public sealed class UnitTextTests
 {

@@ -1,6 +1,6 @@
 using Plant.Register;
 
-namespace Plant.Web.Features.Register;
+namespace Plant.Web.Shared.Forms;
 
 /// <summary>What a form knows of its last save.</summary>
 public sealed class FormState

@@ -1,7 +1,7 @@
 using System.Globalization;
 using System.Text.RegularExpressions;
 
-namespace Plant.Web.Features.Register;
+namespace Plant.Web.Shared.Forms;
 
 /// <summary>Reads what people type with a unit: "55 gal", "0.2 m3", "140 F". The bare number is in the field's own unit.</summary>
 public static partial class UnitText
