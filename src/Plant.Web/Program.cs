@@ -2,6 +2,7 @@ using Plant.Web.Api;
 using Plant.Web.Commands;
 using Plant.Web.Features.Account;
 using Plant.Web.Features.Bench;
+using Plant.Web.Features.Calculators;
 using Plant.Web.Features.Fleet;
 using Plant.Web.Features.Orders;
 using Plant.Web.Features.Records;
@@ -33,6 +34,7 @@ builder.Services.AddReservoirPages();
 builder.Services.AddRegisterPages();
 builder.Services.AddOrders();
 builder.Services.AddRecords();
+builder.Services.AddCalculators();
 
 var app = builder.Build();
 app.UseHosting();
