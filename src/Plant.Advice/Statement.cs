@@ -104,7 +104,21 @@ internal static class Statement
         }
 
         var target = soon ? 0.7 * evidence.LimitPpm!.Value : evidence.Oil.SaturationPpm!.Value;
-        return MethodChoice.For(evidence.Oil, target, emulsified);
+        var (kind, why) = MethodChoice.For(evidence.Oil, target, emulsified);
+        return Confirmed(evidence, new MethodTask(evidence.Water.WaterPpm, target, evidence.Ingress?.MedianGPerDay ?? 0, evidence.Settled?.MedianL ?? 0), kind, why);
+    }
+
+    /// <summary>The first choice where the physics says that it gets there; else the cheapest that does.</summary>
+    private static (SeparatorKind? Kind, string Why) Confirmed(Evidence evidence, MethodTask task, SeparatorKind? kind, string why)
+    {
+        var options = MethodComparison.Of(evidence.Oil, task);
+        if (kind is null || options.Any(o => o.Kind == kind && o.Works) || options.FirstOrDefault(o => o.Works && o.Kind is not null) is not { } other)
+        {
+            return (kind, why);
+        }
+
+        var failed = options.First(o => o.Kind == kind);
+        return (other.Kind, $"{MethodChoice.Words(kind.Value)} {failed.Out}");
     }
 
     private static string Reason(Evidence evidence, Condition condition, SeparatorKind? dehydration)

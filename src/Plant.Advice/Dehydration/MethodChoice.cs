@@ -9,8 +9,12 @@ public static class MethodChoice
     /// <summary>Viscosity above which a mechanical coalescer works poorly [mm²/s].</summary>
     public const double CoalescerViscosityMm2S = 150;
 
-    private const double TightEmulsionMin = 30;
-    private const double WeakInterfaceMNM = 18;
+    /// <summary>Demulsibility above which an emulsion is tight [min] (common practice).</summary>
+    public const double TightEmulsionMin = 30;
+
+    /// <summary>Interfacial tension below which an emulsion is tight [mN/m] (common practice).</summary>
+    public const double WeakInterfaceMNM = 18;
+
     private const double SmallVolumeL = 300;
 
     /// <summary>Chooses.</summary>

@@ -21,7 +21,7 @@ public sealed class ReservoirInputs(AssessmentService assessments, TimeProvider 
         {
             if (value is { } number)
             {
-                found[path] = number.ToString("0.######", CultureInfo.InvariantCulture);
+                found[path] = number.ToString("G5", CultureInfo.InvariantCulture);
             }
         }
 
