@@ -14,7 +14,7 @@ public sealed partial class DocumentationTests
     // longest first: the suffix of a name and the unit that its text must give
     private static readonly (string Suffix, string Unit)[] Units =
     [
-        ("PpmS", "mg/kg/s"), ("WKg", "W/kg"), ("PerM2", "1/m²"), ("PerS", "1/s"), ("WM2K", "W/m²/K"), ("JKgK", "J/kg/K"), ("JKg", "J/kg"), ("KgS", "kg/s"), ("RadS", "rad/s"), ("Rad", "rad"), ("SM", "S/m"), ("VM", "V/m"), ("FM", "F/m"), ("Hz", "Hz"),
+        ("PpmS", "mg/kg/s"), ("MS2", "m/s²"), ("WKg", "W/kg"), ("PerM2", "1/m²"), ("PerS", "1/s"), ("WM2K", "W/m²/K"), ("JKgK", "J/kg/K"), ("JKg", "J/kg"), ("KgS", "kg/s"), ("RadS", "rad/s"), ("Rad", "rad"), ("SM", "S/m"), ("VM", "V/m"), ("FM", "F/m"), ("Hz", "Hz"),
         ("UgPerMin", "µg/min"), ("Mm2S", "mm²/s"), ("KgM3", "kg/m³"), ("M2S", "m²/s"), ("M3S", "m³/s"), ("PerK", "1/K"), ("PaS", "Pa·s"), ("Ppm", "mg/kg"),
         ("MS", "m/s"), ("NM", "N/m"), ("M2", "m²"), ("M3", "m³"), ("Pa", "Pa"), ("Mm", "mm"), ("Ug", "µg"), ("inutes", "min"), ("K", "K"), ("M", "m"), ("S", "s"), ("C", "C"), ("G", "g"),
         ("Kg", "kg"), ("W", "W"), ("J", "J"), ("N", "N"),
