@@ -33,17 +33,17 @@ public sealed class PlantBrowser : IAsyncLifetime
     }
 
     /// <summary>A fresh browser session; signs in as the demo person of a role where one is named.</summary>
-    public async Task<Visit> VisitAsync(string? role = null, bool dark = false, int width = 1366, int height = 900)
+    public async Task<Visit> VisitAsync(string? role = null, bool dark = false, int width = 1366, int height = 900, Uri? server = null)
     {
         var context = await browser!.NewContextAsync(new()
         {
-            BaseURL = Server.BaseAddress.ToString(),
+            BaseURL = (server ?? Server.BaseAddress).ToString(),
             ViewportSize = new() { Width = width, Height = height },
             ColorScheme = dark ? ColorScheme.Dark : ColorScheme.Light,
             Locale = "en-GB",
             TimezoneId = "UTC",
         });
-        var visit = await Visit.OpenAsync(context, Server.BaseAddress);
+        var visit = await Visit.OpenAsync(context, server ?? Server.BaseAddress);
         if (role is not null)
         {
             await visit.SignInAsync(role);
