@@ -9,7 +9,12 @@ public sealed record FluidFields : IFields
 {
     public string? Code { get; set; }
 
-    public string? Name { get; set; }
+    /// <summary>Where it has none, it is called by its key.</summary>
+    public string? Name
+    {
+        get => string.IsNullOrEmpty(field) ? Code : field;
+        set;
+    }
 
     public string? Family { get; set; }
 
@@ -48,7 +53,7 @@ public sealed record FluidFields : IFields
     public void Check(List<Refusal> refusals)
     {
         refusals.Required("code", Code);
-        refusals.Required("name", Name, 200);
+        refusals.Text("name", Name, 200);
         refusals.Required("family", Family);
         refusals.OneOf<FluidFamily>("family", string.IsNullOrWhiteSpace(Family) ? null : Family);
         refusals.Positive("isoVg", IsoVg, 10000, "mm²/s");

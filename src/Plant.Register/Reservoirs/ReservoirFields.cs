@@ -11,7 +11,12 @@ public sealed record ReservoirFields : IFields
 {
     public string? Tag { get; set; }
 
-    public string? Name { get; set; }
+    /// <summary>Where it has none, it is called by its key.</summary>
+    public string? Name
+    {
+        get => string.IsNullOrEmpty(field) ? Tag : field;
+        set;
+    }
 
     public string? Area { get; set; }
 
@@ -60,7 +65,7 @@ public sealed record ReservoirFields : IFields
     public void Check(List<Refusal> refusals)
     {
         refusals.Required("tag", Tag);
-        refusals.Required("name", Name, 200);
+        refusals.Text("name", Name, 200);
         refusals.Text("area", Area);
         refusals.Text("service", Service, 200);
         refusals.Required("fluid", Fluid);

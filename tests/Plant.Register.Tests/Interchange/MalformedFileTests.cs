@@ -26,7 +26,7 @@ public sealed class MalformedFileTests(Plants plants)
         { Fluid, "code,name,family\nX,Oil\n", 2, "", "", "2 cells where the header has 3" },
         { Fluid, "code,name,family\nX,Oil, light,mineral\n", 2, "", "", "quote cells" },
         { Fluid, "code,name,family\n,Oil,mineral\n", 2, "code", "", "may not be empty" },
-        { Fluid, "code,name,family\nX,,mineral\n", 2, "name", "", "may not be empty" },
+        { Fluid, "code,name,family\nX,Oil,\n", 2, "family", "", "may not be empty" },
         { Fluid, "code,name,family\nX,Oil,Mineral\n", 2, "family", "Mineral", "one of mineral" },
         { Fluid, "code,name,family\nX,Oil,petrol\n", 2, "family", "petrol", "one of" },
         { Fluid, "code,name,family,density15KgM3\nX,Oil,mineral,0.87\n", 2, "density15KgM3", "0.87", "between 500 and 2000" },

@@ -117,6 +117,19 @@ public sealed class RoundTripTests(Plants plants)
     }
 
     [Fact]
+    public async Task WithoutNames_ThingsAreCalledByTheirKeys_AndASecondImportIsTheSame()
+    {
+        await using var plant = await plants.EmptyAsync(Engine.Sqlite);
+        var folder = Directory.CreateDirectory(Path.Combine(plant.Folder, "nameless")).FullName;
+        await File.WriteAllTextAsync(Path.Combine(folder, "fluids.csv"), "code,family\nM-1,mineral\n");
+        await File.WriteAllTextAsync(Path.Combine(folder, "reservoirs.csv"), "tag,fluid,name\nR-1,M-1,\n");
+        await ImportAsync(plant, folder);
+        await using var context = await plant.OpenAsync();
+        Assert.Equal(("M-1", "R-1"), ((await context.Fluids.SingleAsync()).Name, (await context.Reservoirs.SingleAsync()).Name));
+        Assert.All((await ImportAsync(plant, folder)).Files, file => Assert.Equal((0, 0), (file.New, file.Refused)));
+    }
+
+    [Fact]
     public async Task OneBadRow_WritesNothing()
     {
         await using var plant = await plants.EmptyAsync(Engine.Sqlite);
