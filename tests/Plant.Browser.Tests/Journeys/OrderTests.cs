@@ -21,7 +21,7 @@ public sealed class OrderTests(PlantBrowser plant)
         Assert.Contains("chosen=", page.Url, StringComparison.Ordinal);
         await page.GetByRole(AriaRole.Button, new() { Name = "Draft orders" }).ClickAsync();
         await page.WaitForURLAsync("**/orders?mine=true");
-        await page.Locator("td a.tag").First.ClickAsync();
+        await page.Locator("tr:has(td:text-is('draft')) td:first-child a.tag").First.ClickAsync();
         await page.WaitForURLAsync("**/orders/1*");
         var number = page.Url.Split('/')[^1];
         await page.GetByRole(AriaRole.Button, new() { Name = "Submit" }).ClickAsync();
